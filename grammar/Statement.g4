@@ -1,0 +1,3 @@
+parser grammar Statement;
+tokens { NUMBER }
+statement: NUMBER EOF;

@@ -1,0 +1,18 @@
+package irreproof.check;
+
+import irreproof.latex.SourceProvider;
+
+/**
+ * What the caller decides about a check.
+ *
+ * @param defaultGroup a group for statements whose document names none, as typed by the user ({@code SU(5)}); or empty
+ * @param stepsPerStatement the budget of each statement
+ */
+public record CheckOptions(String defaultGroup, SourceProvider sources, long stepsPerStatement) {
+    /** Enough for every product that is common in papers; about a second of work. */
+    public static final long DEFAULT_STEPS = 50_000_000;
+
+    public static CheckOptions plain() {
+        return new CheckOptions("", SourceProvider.none(), DEFAULT_STEPS);
+    }
+}

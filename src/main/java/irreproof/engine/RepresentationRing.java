@@ -1,0 +1,57 @@
+package irreproof.engine;
+
+import irreproof.budget.Budget;
+import java.math.BigInteger;
+import java.util.Optional;
+
+/**
+ * The irreps of one group and how they multiply: the interface that every kind of group shares.
+ *
+ * @param <I> the irreps
+ */
+public interface RepresentationRing<I extends Comparable<? super I>> {
+    I trivial();
+
+    BigInteger dimension(I irrep);
+
+    I conjugate(I irrep);
+
+    /** The product of two irreps, decomposed. */
+    Decomposition<I> product(I left, I right, Budget budget);
+
+    /** The symmetric or exterior power of one irrep (exponent 0 or more), decomposed. */
+    Decomposition<I> symmetricPower(I irrep, int exponent, Budget budget);
+
+    /** See {@link #symmetricPower}. */
+    Decomposition<I> exteriorPower(I irrep, int exponent, Budget budget);
+
+    /**
+     * The character of the centre on the irrep, as the trade names it, for the short proof that two sides differ: its
+     * name and its value. Equal values are necessary for terms of one product.
+     */
+    Optional<CentralCharacter> centralCharacter(I irrep);
+
+    /** {@code N-ality} with value {@code 2} of modulus {@code 3}; {@code congruence class} {@code (0,1)}. */
+    record CentralCharacter(String name, String value) {}
+
+    /** The product of two sums, decomposed. */
+    default Decomposition<I> product(Decomposition<I> left, Decomposition<I> right, Budget budget) {
+        Decomposition<I> result = Decomposition.zero();
+        for (var a : left.multiplicities().entrySet()) {
+            for (var b : right.multiplicities().entrySet()) {
+                long count = Math.multiplyExact(a.getValue(), b.getValue());
+                result = result.plus(product(a.getKey(), b.getKey(), budget), count);
+            }
+        }
+        return result;
+    }
+
+    /** The dimension of a sum. */
+    default BigInteger dimension(Decomposition<I> sum) {
+        BigInteger total = BigInteger.ZERO;
+        for (var term : sum.multiplicities().entrySet()) {
+            total = total.add(dimension(term.getKey()).multiply(BigInteger.valueOf(term.getValue())));
+        }
+        return total;
+    }
+}

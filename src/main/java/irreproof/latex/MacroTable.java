@@ -1,0 +1,4 @@
+package irreproof.latex;
+
+/** The macros a document defines. */
+public final class MacroTable {}
