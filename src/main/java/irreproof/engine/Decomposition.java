@@ -20,7 +20,7 @@ public final class Decomposition<I extends Comparable<? super I>> {
     }
 
     public static <I extends Comparable<? super I>> Decomposition<I> zero() {
-        return new Decomposition<>(new TreeMap<>());
+        return new Decomposition<I>(new TreeMap<I, Long>());
     }
 
     public static <I extends Comparable<? super I>> Decomposition<I> of(I irrep) {
