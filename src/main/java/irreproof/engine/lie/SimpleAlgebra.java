@@ -19,6 +19,35 @@ public record SimpleAlgebra(Series series, int rank) {
         }
     }
 
+    /** Of the algebra itself, that is of its adjoint representation. */
+    public long dimension() {
+        long n = rank;
+        return switch (series) {
+            case A -> n * (n + 2);
+            case B, C -> n * (2 * n + 1);
+            case D -> n * (2 * n - 1);
+            case E -> n == 6 ? 78 : n == 7 ? 133 : 248;
+            case F -> 52;
+            case G -> 14;
+        };
+    }
+
+    /** The squared length of a long root in units of a short one: 1, 2 or 3. */
+    public int lacing() {
+        return switch (series) {
+            case A, D, E -> 1;
+            case B, C, F -> 2;
+            case G -> 3;
+        };
+    }
+
+    /** @throws IllegalArgumentException if the weight has another number of labels than this algebra has nodes */
+    public void requireWeight(DominantWeight weight) {
+        if (weight.rank() != rank) {
+            throw new IllegalArgumentException(weight + " is not a weight of " + this);
+        }
+    }
+
     @Override
     public String toString() {
         return series.name() + rank;
