@@ -15,7 +15,7 @@ import java.util.regex.Pattern;
 /** Reads the tables of published values under {@code published/}; every row there carries its own source. */
 public final class Published {
     private static final Pattern GROUP = Pattern.compile("(SU|SO|Sp)\\((\\d+)\\)|([EFG])(\\d)");
-    private static final Pattern TERM = Pattern.compile("(?:(\\d+)\\*)?\\((\\d+)\\)");
+    private static final Pattern TERM = Pattern.compile("(?:(\\d+)\\*)?\\(([\\d,]+)\\)");
 
     private Published() {}
 
@@ -57,7 +57,7 @@ public final class Published {
                 });
     }
 
-    /** One weight: {@code (1001)}; {@code (12)} is one label for rank 1. */
+    /** One weight: {@code (1001)}, {@code (10,0)}; {@code (12)} is one label for rank 1. */
     public static DominantWeight weight(SimpleAlgebra algebra, String text) {
         return terms(algebra, text).get(0);
     }
@@ -68,9 +68,8 @@ public final class Published {
         Matcher match = TERM.matcher(text);
         while (match.find()) {
             int times = match.group(1) == null ? 1 : Integer.parseInt(match.group(1));
-            String[] labels = algebra.rank() == 1
-                    ? new String[] {match.group(2)}
-                    : match.group(2).split("");
+            String separator = match.group(2).contains(",") || algebra.rank() == 1 ? "," : "";
+            String[] labels = match.group(2).split(separator);
             DominantWeight weight = weight(labels);
             for (int i = 0; i < times; i++) {
                 terms.add(weight);
