@@ -1,0 +1,18 @@
+package irreproof.naming;
+
+/** What a group's written name stands for. */
+public sealed interface Resolution {
+    /** The group as the author prints it. */
+    String display();
+
+    /** One simple Lie group. */
+    record Simple(LieGroup group) implements Resolution {
+        @Override
+        public String display() {
+            return group.display();
+        }
+    }
+
+    /** @param reason why statements about it stay undecided, as the user should read it */
+    record Unsupported(String display, String reason) implements Resolution {}
+}
