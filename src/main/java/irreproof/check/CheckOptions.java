@@ -7,8 +7,13 @@ import irreproof.latex.SourceProvider;
  *
  * @param defaultGroup a group for statements whose document names none, as typed by the user ({@code SU(5)}); or empty
  * @param stepsPerStatement the budget of each statement
+ * @param cards whether the report carries what hover shows
  */
-public record CheckOptions(String defaultGroup, SourceProvider sources, long stepsPerStatement) {
+public record CheckOptions(String defaultGroup, SourceProvider sources, long stepsPerStatement, boolean cards) {
+    public CheckOptions(String defaultGroup, SourceProvider sources, long stepsPerStatement) {
+        this(defaultGroup, sources, stepsPerStatement, true);
+    }
+
     /** Enough for every product that is common in papers; about a second of work. */
     public static final long DEFAULT_STEPS = 50_000_000;
 

@@ -1,0 +1,53 @@
+package irreproof.check.judge;
+
+import irreproof.engine.Decomposition;
+import irreproof.notation.Expression;
+import irreproof.notation.Expression.Symmetry;
+import java.util.List;
+
+/**
+ * What came of judging one statement in one setting.
+ *
+ * @param outcome what is claimed
+ * @param reason why it is undecided; empty otherwise
+ * @param reading the reading that makes it hold; for a failure the most usual reading; null if names have no meaning
+ * @param comparisons under that reading, in the order of the sides
+ * @param values what each side lists under that reading; empty if there is none
+ * @param satisfying every reading that makes it hold, most usual first (bounded)
+ * @param unknownNames names that no irrep of the group can have
+ * @param wrongParts terms marked as symmetric or antisymmetric that are not
+ */
+public record Judgement<I extends Comparable<? super I>>(
+        Outcome outcome,
+        String reason,
+        Reading<I> reading,
+        List<Comparison<I>> comparisons,
+        List<Decomposition<I>> values,
+        List<Reading<I>> satisfying,
+        List<Expression.Name> unknownNames,
+        List<WrongPart> wrongParts) {
+    /** What is claimed. */
+    public enum Outcome {
+        HOLDS,
+        FAILS,
+        UNDECIDED,
+        /** The deciding side names irreps that the group does not have: the statement is about another group. */
+        NOT_ITS_GROUP
+    }
+
+    /** A term whose subscript claims a part of the square that it does not lie in. */
+    public record WrongPart(Expression.Name term, Symmetry claimed) {}
+
+    public Judgement {
+        comparisons = List.copyOf(comparisons);
+        values = List.copyOf(values);
+        satisfying = List.copyOf(satisfying);
+        unknownNames = List.copyOf(unknownNames);
+        wrongParts = List.copyOf(wrongParts);
+    }
+
+    static <I extends Comparable<? super I>> Judgement<I> undecided(String reason) {
+        return new Judgement<>(
+                Outcome.UNDECIDED, reason, null, List.of(), List.of(), List.of(), List.of(), List.of());
+    }
+}
