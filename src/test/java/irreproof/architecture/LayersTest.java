@@ -40,6 +40,12 @@ class LayersTest {
                             "workspace",
                             "server")));
 
+    /**
+     * Uses beyond the table that stand until the table or the code is changed: searches for names spend the budget that
+     * the engine below them takes.
+     */
+    private static final Map<String, Set<String>> EXCEPTIONS = Map.of("naming", Set.of("budget"));
+
     /** Libraries that only the named layers know. */
     private static final Map<String, Set<String>> LIBRARY_USERS = Map.of(
             "org.eclipse.lsp4j", Set.of("server"),
@@ -59,7 +65,10 @@ class LayersTest {
         assertNone(dependency -> {
             String from = ProgramClasses.layer(dependency.getOriginClass());
             String to = ProgramClasses.layer(dependency.getTargetClass());
-            return !to.isEmpty() && !to.equals(from) && !MAY_USE.get(from).contains(to);
+            return !to.isEmpty()
+                    && !to.equals(from)
+                    && !MAY_USE.get(from).contains(to)
+                    && !EXCEPTIONS.getOrDefault(from, Set.of()).contains(to);
         });
     }
 
