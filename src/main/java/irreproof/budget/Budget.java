@@ -75,6 +75,11 @@ public final class Budget {
         spend(0);
     }
 
+    /** The steps that are left before work is stopped. */
+    public long remaining() {
+        return Math.max(0, limit - spent);
+    }
+
     public void cancel() {
         cancelled.set(true);
     }

@@ -9,10 +9,16 @@ import java.util.Arrays;
 public final class DominantWeight implements Comparable<DominantWeight> {
     private final int[] labels;
     private final int hash;
+    private final long sum;
 
     private DominantWeight(int[] labels) {
         this.labels = labels;
         this.hash = Arrays.hashCode(labels);
+        long total = 0;
+        for (int label : labels) {
+            total += label;
+        }
+        this.sum = total;
     }
 
     /** @throws IllegalArgumentException if a label is negative */
@@ -40,16 +46,12 @@ public final class DominantWeight implements Comparable<DominantWeight> {
     }
 
     public boolean isZero() {
-        return Arrays.stream(labels).allMatch(label -> label == 0);
-    }
-
-    private long sum() {
-        return Arrays.stream(labels).asLongStream().sum();
+        return sum == 0;
     }
 
     @Override
     public int compareTo(DominantWeight other) {
-        int bySum = Long.compare(sum(), other.sum());
+        int bySum = Long.compare(sum, other.sum);
         return bySum != 0 ? bySum : Arrays.compare(other.labels, labels);
     }
 

@@ -7,6 +7,7 @@ import java.util.LinkedHashSet;
 import java.util.List;
 import java.util.Map;
 import java.util.Set;
+import java.util.stream.IntStream;
 
 /**
  * The root system of a simple Lie algebra: Cartan matrix, invariant form, positive roots. Weights are given by Dynkin
@@ -30,6 +31,7 @@ public final class RootSystem {
     private final int[][] cartan;
     private final long[][] form;
     private final long formDenominator;
+    private final int[][] neighbours;
     private List<Root> positiveRoots;
 
     private RootSystem(SimpleAlgebra algebra) {
@@ -44,6 +46,13 @@ public final class RootSystem {
                 form[i][j] *= simpleRootLength(j);
             }
         }
+        this.neighbours = IntStream.range(0, rank).mapToObj(this::neighbours).toArray(int[][]::new);
+    }
+
+    private int[] neighbours(int node) {
+        return IntStream.range(0, algebra.rank())
+                .filter(other -> other != node && cartan[node][other] != 0)
+                .toArray();
     }
 
     /** @throws BudgetExceeded (too large) beyond rank 128 */
@@ -73,6 +82,28 @@ public final class RootSystem {
     /** The Dynkin labels of a simple root; not to be changed. */
     int[] simpleRoot(int node) {
         return cartan[node];
+    }
+
+    /**
+     * Reflects a weight at the hyperplane of a simple root, in place.
+     *
+     * @return the smallest node whose label changed
+     * @throws ArithmeticException if a label overflows
+     */
+    int reflect(int[] labels, int node) {
+        int label = labels[node];
+        int smallest = node;
+        for (int other : neighbours[node]) {
+            labels[other] = Math.subtractExact(labels[other], Math.multiplyExact(label, cartan[node][other]));
+            smallest = Math.min(smallest, other);
+        }
+        labels[node] = Math.negateExact(label);
+        return smallest;
+    }
+
+    /** The nodes joined to a node of the Dynkin diagram; not to be changed. */
+    int[] neighboursOf(int node) {
+        return neighbours[node];
     }
 
     /** The squared length of a simple root in units of a short root's: 1 for the short ones, the lacing for long ones. */

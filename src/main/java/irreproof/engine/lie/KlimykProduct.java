@@ -1,0 +1,79 @@
+package irreproof.engine.lie;
+
+import irreproof.budget.Budget;
+import irreproof.engine.Decomposition;
+import java.math.BigInteger;
+import java.util.HashMap;
+import java.util.Map;
+
+/**
+ * Products of irreps by the Brauer-Klimyk formula (Brauer 1937; Klimyk 1968; Humphreys, Introduction to Lie Algebras,
+ * exercise 24.9): the weights of one factor are added to the highest weight of the other plus rho, reflected into the
+ * dominant chamber with sign, and those on a wall dropped.
+ *
+ * <p>Cost: one step per weight of the smaller factor and term of the other, beside the character. A multiplicity beyond
+ * 64 bits throws {@link ArithmeticException}. Rank limit as in {@link RootSystem}.
+ */
+public final class KlimykProduct {
+    private KlimykProduct() {}
+
+    /** The product of two irreps. */
+    public static Decomposition<DominantWeight> product(
+            SimpleAlgebra algebra, DominantWeight left, DominantWeight right, Budget budget) {
+        boolean leftIsSmaller =
+                WeylDimension.dimension(algebra, left).compareTo(WeylDimension.dimension(algebra, right)) < 0;
+        DominantWeight smaller = leftIsSmaller ? left : right;
+        DominantWeight larger = leftIsSmaller ? right : left;
+        RootSystem system = RootSystem.of(algebra);
+        budget.require(ProductBound.leastIrreps(algebra, left, right), "the product " + left + " x " + right);
+        Map<DominantWeight, Long> character = DominantCharacter.of(algebra, smaller, budget);
+        return scaled(system, character, 1, Decomposition.of(larger), budget);
+    }
+
+    /**
+     * A sum of irreps times the Adams operation of a character: the character with all weights multiplied by a factor.
+     *
+     * @param character dominant weights with multiplicities
+     * @param factor 1 for the character itself
+     */
+    static Decomposition<DominantWeight> scaled(
+            RootSystem system,
+            Map<DominantWeight, Long> character,
+            int factor,
+            Decomposition<DominantWeight> sum,
+            Budget budget) {
+        if (sum.isZero()) {
+            return sum;
+        }
+        int terms = sum.multiplicities().size();
+        budget.require(weights(system, character).multiply(BigInteger.valueOf(terms)), "a product");
+        Map<DominantWeight, Long> result = new HashMap<>();
+        int[] shifted = new int[system.rank()];
+        character.forEach((dominant, multiplicity) -> WeylOrbit.forEach(system, dominant, budget, weight -> {
+            budget.spend(terms - 1L);
+            for (var term : sum.multiplicities().entrySet()) {
+                DominantWeight highest = term.getKey();
+                for (int node = 0; node < shifted.length; node++) {
+                    int scaled = Math.multiplyExact(factor, weight[node]);
+                    shifted[node] = Math.addExact(Math.addExact(highest.label(node), 1), scaled);
+                }
+                int sign = ChamberReflection.toStrictlyDominant(system, shifted);
+                if (sign != 0) {
+                    for (int node = 0; node < shifted.length; node++) {
+                        shifted[node]--;
+                    }
+                    long count = Math.multiplyExact(Math.multiplyExact(multiplicity, term.getValue()), sign);
+                    result.merge(DominantWeight.of(shifted), count, Math::addExact);
+                }
+            }
+        }));
+        return Decomposition.of(result);
+    }
+
+    /** The number of different weights of a character. */
+    private static BigInteger weights(RootSystem system, Map<DominantWeight, Long> character) {
+        return character.keySet().stream()
+                .map(weight -> WeylOrbit.size(system, weight))
+                .reduce(BigInteger.ZERO, BigInteger::add);
+    }
+}

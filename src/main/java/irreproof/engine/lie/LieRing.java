@@ -1,0 +1,107 @@
+package irreproof.engine.lie;
+
+import irreproof.budget.Budget;
+import irreproof.engine.BoundedCache;
+import irreproof.engine.Decomposition;
+import irreproof.engine.RepresentationRing;
+import java.math.BigInteger;
+import java.util.Map;
+import java.util.Optional;
+
+/**
+ * The representation ring of a simple Lie algebra. Products of A_n by {@link LittlewoodRichardson}, of the other series
+ * by {@link KlimykProduct}; powers by {@link AdamsPowers}. Products, powers and characters are remembered in caches
+ * shared by all rings and threads.
+ *
+ * <p>Invariant: an estimate that refuses work is never above the work's true cost, so what a budget allows does not
+ * depend on the caches.
+ */
+public record LieRing(SimpleAlgebra algebra) implements RepresentationRing<DominantWeight> {
+    private static final long KEPT_TERMS = 200_000;
+    private static final BoundedCache<Product, Decomposition<DominantWeight>> PRODUCTS =
+            new BoundedCache<>(KEPT_TERMS, sum -> sum.multiplicities().size());
+    private static final BoundedCache<Power, Decomposition<DominantWeight>> POWERS =
+            new BoundedCache<>(KEPT_TERMS, sum -> sum.multiplicities().size());
+    private static final BoundedCache<Irrep, Map<DominantWeight, Long>> CHARACTERS =
+            new BoundedCache<>(KEPT_TERMS, Map::size);
+
+    private record Product(SimpleAlgebra algebra, DominantWeight left, DominantWeight right) {}
+
+    private record Power(SimpleAlgebra algebra, DominantWeight weight, boolean exterior, int exponent) {}
+
+    private record Irrep(SimpleAlgebra algebra, DominantWeight weight) {}
+
+    @Override
+    public DominantWeight trivial() {
+        return DominantWeight.of(new int[algebra.rank()]);
+    }
+
+    @Override
+    public BigInteger dimension(DominantWeight irrep) {
+        return WeylDimension.dimension(algebra, irrep);
+    }
+
+    @Override
+    public DominantWeight conjugate(DominantWeight irrep) {
+        return Conjugation.conjugate(algebra, irrep);
+    }
+
+    /** Dominant weights with multiplicities, the highest weight first. */
+    public Map<DominantWeight, Long> character(DominantWeight irrep, Budget budget) {
+        return CHARACTERS.get(
+                new Irrep(algebra, irrep), budget, allowed -> DominantCharacter.of(algebra, irrep, allowed));
+    }
+
+    @Override
+    public Decomposition<DominantWeight> product(DominantWeight left, DominantWeight right, Budget budget) {
+        algebra.requireWeight(left);
+        algebra.requireWeight(right);
+        boolean inOrder = left.compareTo(right) <= 0;
+        DominantWeight first = inOrder ? left : right;
+        DominantWeight second = inOrder ? right : left;
+        return PRODUCTS.get(new Product(algebra, first, second), budget, allowed -> switch (algebra.series()) {
+            case A -> LittlewoodRichardson.product(first, second, allowed);
+            case B, C, D, E, F, G -> KlimykProduct.product(algebra, first, second, allowed);
+        });
+    }
+
+    @Override
+    public Decomposition<DominantWeight> symmetricPower(DominantWeight irrep, int exponent, Budget budget) {
+        return power(irrep, false, exponent, budget);
+    }
+
+    /** Beyond half the dimension by duality: the top exterior power of a simple group's irrep is trivial. */
+    @Override
+    public Decomposition<DominantWeight> exteriorPower(DominantWeight irrep, int exponent, Budget budget) {
+        BigInteger dimension = dimension(irrep);
+        BigInteger rest = dimension.subtract(BigInteger.valueOf(exponent));
+        if (rest.signum() < 0) {
+            return Decomposition.zero();
+        }
+        if (rest.compareTo(BigInteger.valueOf(exponent)) < 0) {
+            return power(conjugate(irrep), true, rest.intValueExact(), budget);
+        }
+        return power(irrep, true, exponent, budget);
+    }
+
+    private Decomposition<DominantWeight> power(DominantWeight irrep, boolean exterior, int exponent, Budget budget) {
+        if (exponent < 0) {
+            throw new IllegalArgumentException("negative exponent " + exponent);
+        }
+        return POWERS.get(
+                new Power(algebra, irrep, exterior, exponent),
+                budget,
+                allowed -> AdamsPowers.power(algebra, character(irrep, allowed), exterior, exponent, allowed));
+    }
+
+    /** The N-ality of SU(N), the congruence class otherwise; empty where the centre is trivial (E8, F4, G2). */
+    @Override
+    public Optional<CentralCharacter> centralCharacter(DominantWeight irrep) {
+        CongruenceClass congruenceClass = CongruenceClass.of(algebra, irrep);
+        if (congruenceClass.modulus() == 1) {
+            return Optional.empty();
+        }
+        String name = algebra.series() == Series.A ? "N-ality" : "congruence class";
+        return Optional.of(new CentralCharacter(name, congruenceClass.toString()));
+    }
+}
