@@ -120,13 +120,16 @@ final class Arbiter {
         }
         if (unsupported != null && !near.isNearerThan(unsupported.near())) {
             return Ruling.undecided(
-                    unsupported.group().display() + ": " + reason(unsupported), unsupported, unsupported.near().source());
+                    unsupported.group().display() + ": " + reason(unsupported),
+                    unsupported,
+                    unsupported.near().source());
         }
         if (failed.setting().factor()) {
             return settled(failed, Verdict.UNDECIDED, "it may be about another factor of the group");
         }
         if (!declared) {
-            Optional<Trial> other = Inference.firstThatHolds(group -> judge(statement, null, group), Trial::holdsAsUsual);
+            Optional<Trial> other =
+                    Inference.firstThatHolds(group -> judge(statement, null, group), Trial::holdsAsUsual);
             if (other.isPresent()) {
                 return settled(
                         failed,
@@ -145,18 +148,22 @@ final class Arbiter {
         }
         if (unsupported != null) {
             return Ruling.undecided(
-                    unsupported.group().display() + ": " + reason(unsupported), unsupported, unsupported.near().source());
+                    unsupported.group().display() + ": " + reason(unsupported),
+                    unsupported,
+                    unsupported.near().source());
         }
         Trial nearest = trials.get(0);
         if (nearest.setting().near() == Nearness.DIRECTIVE) {
             return settled(nearest, Verdict.FAILS, "");
         }
-        Optional<Trial> inferred = Inference.onlyOneThatHolds(group -> judge(statement, null, group), Trial::holdsAsUsual);
+        Optional<Trial> inferred =
+                Inference.onlyOneThatHolds(group -> judge(statement, null, group), Trial::holdsAsUsual);
         if (inferred.isPresent()) {
             return settled(inferred.get(), Verdict.HOLDS, "");
         }
         String reason = "no group named in the text has irreps of these dimensions";
-        return Ruling.undecided(reason, nearest.setting(), nearest.setting().near().source());
+        return Ruling.undecided(
+                reason, nearest.setting(), nearest.setting().near().source());
     }
 
     private Ruling withoutSetting(Statement statement) {
@@ -190,7 +197,8 @@ final class Arbiter {
             return differs(dimensions.get());
         }
         SettingCandidate nearest = candidates.isEmpty() ? null : candidates.get(0);
-        SettingSource source = nearest == null ? SettingSource.NONE : nearest.near().source();
+        SettingSource source =
+                nearest == null ? SettingSource.NONE : nearest.near().source();
         return Ruling.undecided("branching rules are not judged yet", nearest, source);
     }
 
@@ -218,8 +226,7 @@ final class Arbiter {
     private static Optional<Ruling.Dimensions> dimensionsDiffer(Statement statement) {
         Optional<Ruling.Dimensions> found = Optional.empty();
         for (Chain.Link link : Chain.links(statement)) {
-            boolean equation =
-                    link.kind() == irreproof.check.judge.Comparison.Kind.EQUAL && !link.projecting();
+            boolean equation = link.kind() == irreproof.check.judge.Comparison.Kind.EQUAL && !link.projecting();
             if (!equation) {
                 continue;
             }

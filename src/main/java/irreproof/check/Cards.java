@@ -91,7 +91,8 @@ final class Cards {
                         expression.span(),
                         expression.span().of(source.content()).strip(),
                         List.of(
-                                new Card.Row("decomposes into", subject.wording().usualSum(value)),
+                                new Card.Row(
+                                        "decomposes into", subject.wording().usualSum(value)),
                                 new Card.Row(
                                         "dimension", subject.dimension(value).toString()))));
             }

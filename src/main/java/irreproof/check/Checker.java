@@ -59,7 +59,8 @@ public final class Checker {
         for (Found place : found) {
             Statement statement = place.statement();
             Ruling ruling = arbiter.decide(
-                    statement, settings.candidates(statement.span(), place.passage().span()));
+                    statement,
+                    settings.candidates(statement.span(), place.passage().span()));
             cases.add(new Case(statement, ruling, new Wording(document.source(), statement, samples, ruling, budget)));
         }
         return report(cases);
@@ -116,7 +117,8 @@ public final class Checker {
         List<Found> found = new ArrayList<>();
         for (Passage passage : document.passages()) {
             if (!directives.isPaused(passage.span().start())) {
-                for (Statement statement : StatementFinder.find(document.source().content(), passage, budget)) {
+                for (Statement statement :
+                        StatementFinder.find(document.source().content(), passage, budget)) {
                     found.add(new Found(statement, passage));
                 }
             }

@@ -42,7 +42,8 @@ public final class Derivation {
         }
         Statement statement = statements.get(0);
         if (!statement.problems().isEmpty()) {
-            return new Result(false, "cannot be read: " + statement.problems().get(0).message());
+            return new Result(
+                    false, "cannot be read: " + statement.problems().get(0).message());
         }
         Optional<Resolution> setting = group.isEmpty() ? named(typed) : Directives.group(group);
         if (setting.isEmpty()) {
@@ -59,15 +60,14 @@ public final class Derivation {
     }
 
     private static Optional<Resolution> named(String latex) {
-        return GroupReader.find(Reader.flatten(latex)).stream()
-                .findFirst()
-                .map(Groups::resolve);
+        return GroupReader.find(Reader.flatten(latex)).stream().findFirst().map(Groups::resolve);
     }
 
     private static Result complete(String latex, Statement statement, Resolution.Simple group, Budget budget) {
         int reference = Chain.reference(statement);
         var side = statement.sides().get(reference);
-        Statement bare = new Statement(List.of(side), List.of(), side.span(), side.span().of(latex), List.of());
+        Statement bare =
+                new Statement(List.of(side), List.of(), side.span(), side.span().of(latex), List.of());
         LieLexicon lexicon = new LieLexicon(group.group(), DeclaredNames.NONE);
         Judgement<DominantWeight> judgement = Judge.judge(bare, lexicon, budget);
         return switch (judgement.outcome()) {
@@ -77,10 +77,8 @@ public final class Derivation {
                 yield new Result(false, group.display() + " has no irrep " + name);
             }
             case HOLDS -> {
-                Ruling ruling = new Ruling(
-                        Verdict.HOLDS, "", null, SettingSource.NONE, judgement, lexicon, null, null);
-                Wording wording =
-                        new Wording(new SourceText("", latex), bare, List.of(statement), ruling, budget);
+                Ruling ruling = new Ruling(Verdict.HOLDS, "", null, SettingSource.NONE, judgement, lexicon, null, null);
+                Wording wording = new Wording(new SourceText("", latex), bare, List.of(statement), ruling, budget);
                 String right = wording.corrected(judgement.values().get(0), 0);
                 yield new Result(true, bare.latex().strip() + " = " + right);
             }

@@ -22,9 +22,10 @@ final class DimensionMismatch implements StatementRule {
     public List<Finding> examine(Case subject) {
         Ruling.Dimensions dimensions = subject.ruling().dimensions();
         if (dimensions != null) {
-            String message = message(subject, dimensions.against(), dimensions.expected(), dimensions.side(), dimensions.found());
-            return List.of(subject.finding(
-                    this, subject.side(dimensions.side()).span(), message, List.of(), List.of()));
+            String message = message(
+                    subject, dimensions.against(), dimensions.expected(), dimensions.side(), dimensions.found());
+            return List.of(
+                    subject.finding(this, subject.side(dimensions.side()).span(), message, List.of(), List.of()));
         }
         List<Finding> findings = new ArrayList<>();
         for (Comparison<DominantWeight> failure : subject.failures()) {

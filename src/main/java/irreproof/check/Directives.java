@@ -19,7 +19,8 @@ import java.util.regex.Pattern;
 final class Directives {
     private static final Pattern MARK = Pattern.compile("^\\s*irreproof:\\s*(.*?)\\s*$");
     private static final Pattern WORD = Pattern.compile("^(\\S+)\\s*(.*)$");
-    private static final Pattern NAME = Pattern.compile("^([\\w']+)\\s*=\\s*\\(\\s*(\\d{1,4}(?:\\s*,\\s*\\d{1,4})*)\\s*\\)$");
+    private static final Pattern NAME =
+            Pattern.compile("^([\\w']+)\\s*=\\s*\\(\\s*(\\d{1,4}(?:\\s*,\\s*\\d{1,4})*)\\s*\\)$");
 
     private final List<Directive> all;
 

@@ -62,7 +62,8 @@ final class DocumentReadings {
             Map<Decomposition<DominantWeight>, Long> votes = new HashMap<>();
             list.forEach(need -> votes.merge(need.meaning(), 2L + (need.usual() ? 1 : 0), Long::sum));
             if (votes.size() > 1) {
-                long most = votes.values().stream().mapToLong(Long::longValue).max().orElse(0);
+                long most =
+                        votes.values().stream().mapToLong(Long::longValue).max().orElse(0);
                 Need leader = list.stream()
                         .filter(need -> votes.get(need.meaning()) == most)
                         .findFirst()
@@ -93,11 +94,11 @@ final class DocumentReadings {
     private void warn(NameKey key, Need need, Need leader) {
         Case subject = cases.get(need.statement());
         Case other = cases.get(leader.statement());
-        String message = key.text() + " must be " + label(need.meaning()) + " for this to hold, but "
-                + label(leader.meaning()) + " in line " + other.wording().line(other.statement().span());
+        String message =
+                key.text() + " must be " + label(need.meaning()) + " for this to hold, but " + label(leader.meaning())
+                        + " in line " + other.wording().line(other.statement().span());
         findings.get(need.statement())
-                .add(new Finding(
-                        CONFLICT, Severity.WARNING, place(subject, key), message, List.of(), List.of()));
+                .add(new Finding(CONFLICT, Severity.WARNING, place(subject, key), message, List.of(), List.of()));
     }
 
     private void adviseUnusual() {
@@ -111,7 +112,10 @@ final class DocumentReadings {
             for (var meaning : reading.meanings().entrySet()) {
                 Key key = new Key(subject.ruling().lexicon().group(), meaning.getKey());
                 if (meaning.getValue().unusual() > 0 && said.add(key)) {
-                    advise(i, place(subject, meaning.getKey()), unusualMessage(subject, meaning.getKey(), meaning.getValue()));
+                    advise(
+                            i,
+                            place(subject, meaning.getKey()),
+                            unusualMessage(subject, meaning.getKey(), meaning.getValue()));
                 }
             }
             if (reading.interpretation().diagrams() == Diagrams.CONJUGATE && said.add(Diagrams.CONJUGATE)) {
@@ -122,13 +126,11 @@ final class DocumentReadings {
 
     private static String unusualMessage(Case subject, NameKey key, Candidate<DominantWeight> meaning) {
         return "this holds if " + key.text() + " is " + label(meaning.value()) + ", which is usually called "
-                + subject.wording()
-                        .usualName(meaning.value().multiplicities().firstKey());
+                + subject.wording().usualName(meaning.value().multiplicities().firstKey());
     }
 
     private void advise(int statement, Span place, String message) {
-        findings.get(statement)
-                .add(new Finding(UNUSUAL, Severity.ADVICE, place, message, List.of(), List.of()));
+        findings.get(statement).add(new Finding(UNUSUAL, Severity.ADVICE, place, message, List.of(), List.of()));
     }
 
     private static String label(Decomposition<DominantWeight> meaning) {
@@ -139,7 +141,8 @@ final class DocumentReadings {
         var interpretation = subject.ruling().judgement().reading().interpretation();
         return subject.statement().sides().stream()
                 .flatMap(side -> Names.of(side).stream())
-                .filter(name -> subject.ruling().lexicon().key(name, interpretation).equals(key))
+                .filter(name ->
+                        subject.ruling().lexicon().key(name, interpretation).equals(key))
                 .map(Name::span)
                 .findFirst()
                 .orElse(subject.statement().span());

@@ -44,8 +44,7 @@ final class Inference {
     }
 
     /** The trial in the only small group in which the statement holds; empty if there is none or more than one. */
-    static <T> Optional<T> onlyOneThatHolds(
-            Function<Resolution.Simple, T> judge, Predicate<T> holds) {
+    static <T> Optional<T> onlyOneThatHolds(Function<Resolution.Simple, T> judge, Predicate<T> holds) {
         List<T> found = SMALL_GROUPS.stream().map(judge).filter(holds).limit(2).toList();
         return found.size() == 1 ? Optional.of(found.get(0)) : Optional.empty();
     }

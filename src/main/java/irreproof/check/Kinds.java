@@ -20,8 +20,8 @@ final class Kinds {
             return StatementKind.PRODUCT;
         }
         boolean contains = statement.relations().stream()
-                .anyMatch(relation -> relation.kind() == Relation.Kind.CONTAINS
-                        || relation.kind() == Relation.Kind.CONTAINED);
+                .anyMatch(relation ->
+                        relation.kind() == Relation.Kind.CONTAINS || relation.kind() == Relation.Kind.CONTAINED);
         if (contains) {
             return StatementKind.CONTAINMENT;
         }

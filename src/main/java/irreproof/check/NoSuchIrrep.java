@@ -23,7 +23,8 @@ final class NoSuchIrrep implements StatementRule {
         }
         List<Finding> findings = new ArrayList<>();
         for (Name name : subject.ruling().judgement().unknownNames()) {
-            String message = subject.ruling().settingName() + " has no irrep " + subject.wording().written(name);
+            String message = subject.ruling().settingName() + " has no irrep "
+                    + subject.wording().written(name);
             findings.add(subject.finding(this, name.span(), message, List.of(), List.of()));
         }
         return findings;

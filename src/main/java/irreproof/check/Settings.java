@@ -47,8 +47,10 @@ final class Settings {
         List<Heading> above = headingsAbove(statement.start());
         for (GroupName mention : mentions) {
             if (!mention.span().overlaps(statement)) {
-                placed.add(new Placed(mention, nearness(mention.span(), passage, paragraph, above), distance(
-                        mention.span(), statement)));
+                placed.add(new Placed(
+                        mention,
+                        nearness(mention.span(), passage, paragraph, above),
+                        distance(mention.span(), statement)));
             }
         }
         placed.sort(Comparator.comparing(Placed::near).thenComparingLong(Placed::distance));
@@ -73,14 +75,17 @@ final class Settings {
     private static void add(Placed mention, Map<String, SettingCandidate> candidates) {
         Resolution whole = Groups.resolve(mention.name());
         candidates.putIfAbsent(
-                whole.display(), new SettingCandidate(whole, mention.near(), mention.name().span(), false));
+                whole.display(),
+                new SettingCandidate(whole, mention.near(), mention.name().span(), false));
         if (mention.name().factors().size() > 1) {
             for (GroupName.Factor factor : mention.name().factors()) {
-                Resolution part = Groups.resolve(new GroupName(List.of(factor), mention.name().span()));
+                Resolution part = Groups.resolve(
+                        new GroupName(List.of(factor), mention.name().span()));
                 if (part instanceof Resolution.Simple) {
                     candidates.putIfAbsent(
                             part.display(),
-                            new SettingCandidate(part, mention.near(), mention.name().span(), true));
+                            new SettingCandidate(
+                                    part, mention.near(), mention.name().span(), true));
                 }
             }
         }

@@ -29,7 +29,8 @@ final class Suppressions {
     List<Finding> filter(Span statement, List<Finding> findings) {
         List<Finding> kept = new ArrayList<>(findings);
         for (Directive.Allow allow : allows) {
-            if (covers(allow, statement) && kept.removeIf(finding -> finding.rule().equals(allow.rule()))) {
+            if (covers(allow, statement)
+                    && kept.removeIf(finding -> finding.rule().equals(allow.rule()))) {
                 used.add(allow);
             }
         }
@@ -49,7 +50,8 @@ final class Suppressions {
         List<Finding> findings = new ArrayList<>();
         for (Directive directive : directives.all()) {
             if (directive instanceof Directive.Unreadable unreadable) {
-                findings.add(warning(UNREADABLE, directive.span(), "cannot read this directive: " + unreadable.problem()));
+                findings.add(
+                        warning(UNREADABLE, directive.span(), "cannot read this directive: " + unreadable.problem()));
             } else if (directive instanceof Directive.Allow allow && !used.contains(allow)) {
                 findings.add(warning(UNUSED, directive.span(), "the next statement does not break " + allow.rule()));
             }

@@ -67,7 +67,14 @@ class CorpusScoreboardTest {
             String nothing = report.statements().isEmpty() ? "no statement found" : "";
             return String.join(
                     " | ",
-                    List.of(seen.id(), seen.kind(), seen.group(), seen.truth(), verdict().word(), rules, reasons + nothing));
+                    List.of(
+                            seen.id(),
+                            seen.kind(),
+                            seen.group(),
+                            seen.truth(),
+                            verdict().word(),
+                            rules,
+                            reasons + nothing));
         }
 
         private String alarmsAndAdvice() {
@@ -122,7 +129,8 @@ class CorpusScoreboardTest {
             if (outcome.asLabelled()) {
                 settled.add(outcome);
             } else {
-                open.computeIfAbsent(outcome.seen().kind(), kind -> new ArrayList<>()).add(outcome);
+                open.computeIfAbsent(outcome.seen().kind(), kind -> new ArrayList<>())
+                        .add(outcome);
             }
         }
         text.append("\n# Not decided as labelled: id | kind | group | truth | verdict | findings | reason\n");

@@ -15,8 +15,7 @@ record SeenStatement(String id, String latex, String group, String kind, String 
             Pattern.compile("(SU|SO|Sp)\\(\\d+\\)( colour| isospin)?|SO\\(6\\)=SU\\(4\\)|G2|F4|E[678]");
 
     /** What the authors' own preambles define. */
-    private static final String MACROS =
-            """
+    private static final String MACROS = """
             \\renewcommand{\\v}{\\boldsymbol{8_v}}
             \\newcommand{\\s}{\\boldsymbol{8_s}}
             \\renewcommand{\\c}{\\boldsymbol{8_c}}

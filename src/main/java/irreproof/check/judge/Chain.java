@@ -89,8 +89,7 @@ public final class Chain {
             }
             boolean arrow = statement.relations().subList(Math.min(i, reference), Math.max(i, reference)).stream()
                     .anyMatch(relation -> relation.kind() == Relation.Kind.ARROW);
-            Comparison.Kind kind =
-                    Names.isOpen(sides.get(i)) ? Comparison.Kind.PART_OF : Comparison.Kind.EQUAL;
+            Comparison.Kind kind = Names.isOpen(sides.get(i)) ? Comparison.Kind.PART_OF : Comparison.Kind.EQUAL;
             links.add(new Link(i, reference, kind, arrow));
         }
     }

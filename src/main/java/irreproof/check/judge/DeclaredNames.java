@@ -23,8 +23,9 @@ public record DeclaredNames(List<Declaration> declarations) {
 
     /** The irrep declared for the name without its bars; a declaration of the wrong rank or dimension does not count. */
     Optional<DominantWeight> meaning(NumberName name, LieGroup group) {
-        String written =
-                name.numerator() + "'".repeat(name.decoration().primes()) + name.decoration().label();
+        String written = name.numerator()
+                + "'".repeat(name.decoration().primes())
+                + name.decoration().label();
         return declarations.stream()
                 .filter(declaration -> declaration.name().equals(written))
                 .map(Declaration::irrep)

@@ -56,11 +56,10 @@ public final class DimensionSums {
     private static Optional<BigInteger> ofNumber(NumberName name, Numbers numbers) {
         boolean half = name.denominator() == 2;
         return switch (numbers) {
-            case DIMENSION -> half || name.numerator().signum() <= 0
-                    ? Optional.empty()
-                    : Optional.of(name.numerator());
-            case SPIN -> Optional.of(half ? name.numerator() : name.numerator().shiftLeft(1))
-                    .map(BigInteger.ONE::add);
+            case DIMENSION -> half || name.numerator().signum() <= 0 ? Optional.empty() : Optional.of(name.numerator());
+            case SPIN ->
+                Optional.of(half ? name.numerator() : name.numerator().shiftLeft(1))
+                        .map(BigInteger.ONE::add);
         };
     }
 

@@ -122,11 +122,10 @@ final class Evaluator<I extends Comparable<? super I>> {
 
     /** The symmetric or antisymmetric part of the square of a sum. */
     Decomposition<I> square(Decomposition<I> base, Symmetry symmetry) {
-        PowerKind kind =
-                switch (symmetry) {
-                    case SYMMETRIC -> PowerKind.SYMMETRIC;
-                    case ANTISYMMETRIC -> PowerKind.EXTERIOR;
-                };
+        PowerKind kind = switch (symmetry) {
+            case SYMMETRIC -> PowerKind.SYMMETRIC;
+            case ANTISYMMETRIC -> PowerKind.EXTERIOR;
+        };
         return symmetrised(summands(base), 0, kind, 2);
     }
 

@@ -23,8 +23,9 @@ final class FixedNames {
             return false;
         }
         return switch (group.algebra().series()) {
-            case A -> barredByClass(group, irrep, conjugate) && barredByBoxes(irrep, conjugate)
-                    || isSquareOfDefining(conjugate);
+            case A ->
+                barredByClass(group, irrep, conjugate) && barredByBoxes(irrep, conjugate)
+                        || isSquareOfDefining(conjugate);
             case D, E -> isFundamental(irrep) && barredByClass(group, irrep, conjugate);
             case B, C, F, G -> false;
         };

@@ -12,9 +12,11 @@ public record Interpretation(Numbers numbers, Lists lists, Diagrams diagrams) {
     public enum Lists {
         DYNKIN_BOURBAKI,
         /** Dynkin labels in the node order of Slansky's tables, where it differs. */
-        DYNKIN_PHYSICS,
+        DYNKIN_SLANSKY,
         PARTITION_ROWS,
-        PARTITION_COLUMNS
+        PARTITION_COLUMNS,
+        /** The rank of an antisymmetric or traceless symmetric tensor of SO(n). */
+        TENSOR_RANK
     }
 
     /** What a box of a Young diagram stands for. */

@@ -79,7 +79,14 @@ public final class Judge<I extends Comparable<? super I>> {
         }
         if (best != null) {
             return new Judgement<>(
-                    Outcome.HOLDS, "", best.reading(), best.comparisons(), best.values(), satisfying, List.of(), List.of());
+                    Outcome.HOLDS,
+                    "",
+                    best.reading(),
+                    best.comparisons(),
+                    best.values(),
+                    satisfying,
+                    List.of(),
+                    List.of());
         }
         Judgement<I> nearest = failures.stream()
                 .min(Comparator.comparingInt(Judge::badness))
@@ -101,11 +108,17 @@ public final class Judge<I extends Comparable<? super I>> {
 
     /** Of several failures, the one that is nearest to holding is what the author meant. */
     private static int badness(Judgement<?> failure) {
-        int names = failure.outcome() == Outcome.NOT_ITS_GROUP ? 1000 : 100 * failure.unknownNames().size();
+        int names = failure.outcome() == Outcome.NOT_ITS_GROUP
+                ? 1000
+                : 100 * failure.unknownNames().size();
         int wrong = failure.comparisons().stream().mapToInt(Judge::distance).sum();
         int unusual = failure.reading() == null ? 0 : failure.reading().unusual();
         int undecided = failure.outcome() == Outcome.UNDECIDED ? -1_000_000 : 0;
-        return undecided + names + 10 * unusual + Math.min(wrong, 9) + failure.wrongParts().size();
+        return undecided
+                + names
+                + 10 * unusual
+                + Math.min(wrong, 9)
+                + failure.wrongParts().size();
     }
 
     private static int distance(Comparison<?> comparison) {
@@ -147,8 +160,7 @@ public final class Judge<I extends Comparable<? super I>> {
         if (!holds && projection) {
             throw new Undecidable("an arrow behind a product may mean a projection");
         }
-        List<WrongPart> wrongParts =
-                holds ? Parts.wrong(statement, lexicon, reading, evaluator, values) : List.of();
+        List<WrongPart> wrongParts = holds ? Parts.wrong(statement, lexicon, reading, evaluator, values) : List.of();
         Outcome outcome = holds && wrongParts.isEmpty() ? Outcome.HOLDS : Outcome.FAILS;
         return new Judgement<>(outcome, "", reading, comparisons, values, List.of(), List.of(), wrongParts);
     }
@@ -157,13 +169,12 @@ public final class Judge<I extends Comparable<? super I>> {
         Decomposition<I> expected = values.get(link.against());
         Decomposition<I> found = values.get(link.side());
         boolean partOf = found.minus(expected).positivePart().isZero();
-        boolean holds =
-                switch (link.kind()) {
-                    case EQUAL -> found.equals(expected);
-                    case PART_OF -> partOf;
-                    case DIFFERENT -> !found.equals(expected);
-                    case NOT_PART_OF -> !partOf;
-                };
+        boolean holds = switch (link.kind()) {
+            case EQUAL -> found.equals(expected);
+            case PART_OF -> partOf;
+            case DIFFERENT -> !found.equals(expected);
+            case NOT_PART_OF -> !partOf;
+        };
         return new Comparison<>(link.side(), link.against(), link.kind(), holds, expected, found);
     }
 }

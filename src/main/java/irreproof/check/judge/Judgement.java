@@ -47,7 +47,6 @@ public record Judgement<I extends Comparable<? super I>>(
     }
 
     static <I extends Comparable<? super I>> Judgement<I> undecided(String reason) {
-        return new Judgement<>(
-                Outcome.UNDECIDED, reason, null, List.of(), List.of(), List.of(), List.of(), List.of());
+        return new Judgement<>(Outcome.UNDECIDED, reason, null, List.of(), List.of(), List.of(), List.of(), List.of());
     }
 }

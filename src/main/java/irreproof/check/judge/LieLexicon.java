@@ -14,6 +14,7 @@ import irreproof.engine.lie.WeylDimension;
 import irreproof.naming.Custom;
 import irreproof.naming.DimensionNames;
 import irreproof.naming.LieGroup;
+import irreproof.naming.Spins;
 import irreproof.notation.Expression.DiagramName;
 import irreproof.notation.Expression.ListName;
 import irreproof.notation.Expression.Name;
@@ -37,7 +38,7 @@ public final class LieLexicon implements Lexicon<DominantWeight> {
 
     public LieLexicon(LieGroup group, DeclaredNames declared) {
         this.group = group;
-        this.ring = LieRing.of(group.algebra());
+        this.ring = new LieRing(group.algebra());
         this.dimensionNames = new DimensionNames(group);
         this.declared = declared;
     }
@@ -95,7 +96,7 @@ public final class LieLexicon implements Lexicon<DominantWeight> {
         for (Name name : names) {
             if (name instanceof ListName list) {
                 any = true;
-                senses.removeIf(sense -> BracketNames.weight(list, sense, group).isEmpty());
+                senses.removeIf(sense -> BracketNames.value(list, sense, group).isEmpty());
                 if (!list.decoration().charges().isEmpty() || BracketNames.isTuple(list)) {
                     throw new Undecidable("irreps of product groups and charges are not judged yet");
                 }
@@ -109,8 +110,9 @@ public final class LieLexicon implements Lexicon<DominantWeight> {
     }
 
     private Set<Diagrams> diagramSenses(Collection<Name> names) {
-        boolean any = names.stream().anyMatch(name -> name instanceof DiagramName diagram
-                && !diagram.rows().isEmpty());
+        boolean any = names.stream()
+                .anyMatch(name ->
+                        name instanceof DiagramName diagram && !diagram.rows().isEmpty());
         if (!any) {
             return EnumSet.of(Diagrams.DEFINING);
         }
@@ -130,7 +132,11 @@ public final class LieLexicon implements Lexicon<DominantWeight> {
             return new NameKey(spin ? "" : dimension, dimension + primes + suffix(number));
         }
         if (name instanceof ListName list) {
-            return new NameKey("", list.bracket() + BracketNames.numbers(list).toString());
+            return new NameKey(
+                    "",
+                    list.bracket()
+                            + list.entries().toString()
+                            + list.decoration().label());
         }
         return new NameKey("", "diagram " + ((DiagramName) name).rows());
     }
@@ -146,18 +152,15 @@ public final class LieLexicon implements Lexicon<DominantWeight> {
             return interpretation.numbers() == Numbers.SPIN ? spin(number) : dimension(number, budget);
         }
         Optional<Decomposition<DominantWeight>> value = name instanceof ListName list
-                ? BracketNames.weight(list, interpretation.lists(), group)
+                ? BracketNames.value(list, interpretation.lists(), group)
                 : diagram((DiagramName) name, interpretation.diagrams());
         return value.map(sum -> List.of(new Candidate<>(sum, 0))).orElse(List.of());
     }
 
     private static List<Candidate<DominantWeight>> spin(NumberName number) {
-        BigInteger twice = number.denominator() == 2
-                ? number.numerator()
-                : number.numerator().shiftLeft(1);
-        return twice.signum() < 0 || twice.bitLength() > 30
-                ? List.of()
-                : List.of(new Candidate<>(Decomposition.of(DominantWeight.of(twice.intValue())), 0));
+        return Spins.irrep(number.numerator(), number.denominator()).stream()
+                .map(irrep -> new Candidate<>(Decomposition.of(irrep), 0))
+                .toList();
     }
 
     private List<Candidate<DominantWeight>> dimension(NumberName number, Budget budget) {
@@ -195,7 +198,8 @@ public final class LieLexicon implements Lexicon<DominantWeight> {
         if (name.decoration().symmetry() != null) {
             return name.decoration().symmetry();
         }
-        boolean labelIsName = group.algebra().series() == Series.D && group.algebra().rank() == 4;
+        boolean labelIsName =
+                group.algebra().series() == Series.D && group.algebra().rank() == 4;
         return switch (labelIsName ? "" : name.decoration().label().toLowerCase(Locale.ROOT)) {
             case "s" -> Symmetry.SYMMETRIC;
             case "a" -> Symmetry.ANTISYMMETRIC;

@@ -38,7 +38,8 @@ final class Parts {
         }
         List<WrongPart> wrong = new ArrayList<>();
         for (int i = 0; i < statement.sides().size(); i++) {
-            List<Marked> marked = i == reference ? List.of() : marked(statement.sides().get(i), lexicon);
+            List<Marked> marked =
+                    i == reference ? List.of() : marked(statement.sides().get(i), lexicon);
             if (meansParts(marked, statement.sides().get(i))) {
                 wrong.addAll(wrongTerms(marked, lexicon, reading, evaluator, factor));
             }

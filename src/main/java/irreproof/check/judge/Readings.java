@@ -51,7 +51,8 @@ final class Readings<I extends Comparable<? super I>> {
         List<NameKey> keys = List.copyOf(candidates.keySet());
         List<Reading<I>> result = new ArrayList<>();
         int worst = candidates.values().stream()
-                .mapToInt(list -> list.stream().mapToInt(Candidate::unusual).max().orElse(0))
+                .mapToInt(
+                        list -> list.stream().mapToInt(Candidate::unusual).max().orElse(0))
                 .sum();
         for (int unusual = 0; unusual <= worst && !truncated; unusual++) {
             extend(keys, 0, unusual, new LinkedHashMap<>(), result);
@@ -100,6 +101,9 @@ final class Readings<I extends Comparable<? super I>> {
         }
         var irreps = one.value().multiplicities().keySet();
         return irreps.size() == 1
-                && other.value().multiplicity(lexicon.ring().conjugate(irreps.iterator().next())) == 1;
+                && other.value()
+                                .multiplicity(lexicon.ring()
+                                        .conjugate(irreps.iterator().next()))
+                        == 1;
     }
 }
