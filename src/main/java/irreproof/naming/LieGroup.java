@@ -59,11 +59,10 @@ public record LieGroup(String display, Family family, int degree, SimpleAlgebra 
 
     /** E6, E7, E8, F4 or G2. @throws IllegalArgumentException for anything else */
     public static LieGroup exceptional(Series series, int rank) {
-        boolean classical =
-                switch (series) {
-                    case A, B, C, D -> true;
-                    case E, F, G -> false;
-                };
+        boolean classical = switch (series) {
+            case A, B, C, D -> true;
+            case E, F, G -> false;
+        };
         if (classical) {
             throw new IllegalArgumentException("" + series + rank + " is not exceptional");
         }
