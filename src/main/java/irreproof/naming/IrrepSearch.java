@@ -13,11 +13,14 @@ import java.util.stream.IntStream;
 
 /**
  * All irreps of one dimension, or up to one. The dimension grows strictly with every Dynkin label (each factor of Weyl's
- * formula grows or stays), so labels are raised one node after another until the bound is passed, and the last node is
- * found by bisection. Nodes whose fundamental irrep is already too large take no part; those with small fundamental
- * irreps come last, where most labels are skipped. Cost: one dimension for each dominant weight below the bound that has
- * label 0 at the last node, times the logarithm of that label; some 10^4 dimensions for 10^7 in SU(3), a few hundred in
- * SU(50). Labels beyond 2^30 are refused.
+ * formula grows or stays), so the largest label at a node that keeps within the bound is found by bisection, and smaller
+ * ones are tried one by one, node after node; at the last node only the largest can fit. A label plus 1 is itself a
+ * factor of Weyl's numerator, whose denominator has no prime from the Coxeter number on; so most labels are dismissed by
+ * a division. Nodes whose fundamental irrep is already too large take no part; those with small fundamental irreps come
+ * last, where most labels are skipped.
+ *
+ * <p>Cost: at most one dimension for each dominant weight below the bound that has label 0 at the last node, times the
+ * logarithm of that label. Labels beyond 2^30 are refused.
  */
 final class IrrepSearch {
     private static final int LARGEST_LABEL = 1 << 30;
@@ -28,6 +31,7 @@ final class IrrepSearch {
     private final long stepsPerDimension;
     private final int[] labels;
     private final int[] nodes;
+    private final int[] denominatorPrimes;
     private final List<DominantWeight> found = new ArrayList<>();
     private long steps;
 
@@ -38,6 +42,7 @@ final class IrrepSearch {
         this.stepsPerDimension = 1 + (long) algebra.rank() * algebra.rank();
         this.labels = new int[algebra.rank()];
         this.nodes = smallFundamentals();
+        this.denominatorPrimes = primesBelow(coxeterNumber(algebra));
     }
 
     /** What a search found, in the order of weights, and the steps it took. */
@@ -67,18 +72,62 @@ final class IrrepSearch {
         return List.copyOf(search.found);
     }
 
+    /** The nodes whose fundamental irreps keep within the bound, those with the smallest ones last. */
     private int[] smallFundamentals() {
         record Node(int index, BigInteger dimension) {}
-        return IntStream.range(0, algebra.rank())
-                .mapToObj(node -> {
-                    labels[node] = 1;
-                    BigInteger dimension = dimension();
-                    labels[node] = 0;
-                    return new Node(node, dimension);
-                })
-                .filter(node -> node.dimension().compareTo(bound) <= 0)
+        List<Node> nodes = new ArrayList<>();
+        int rank = algebra.rank();
+        int first = 0;
+        int last = rank - 1;
+        // along a classical diagram the fundamental dimensions rise, then fall: the large ones lie in the middle
+        boolean classical = switch (algebra.series()) {
+            case A, B, C, D -> true;
+            case E, F, G -> false;
+        };
+        for (; first < rank; first++) {
+            BigInteger dimension = fundamental(first);
+            if (dimension.compareTo(bound) <= 0) {
+                nodes.add(new Node(first, dimension));
+            } else if (classical) {
+                break;
+            }
+        }
+        for (; last > first; last--) {
+            BigInteger dimension = fundamental(last);
+            if (dimension.compareTo(bound) > 0) {
+                break;
+            }
+            nodes.add(new Node(last, dimension));
+        }
+        return nodes.stream()
                 .sorted(Comparator.comparing(Node::dimension).reversed())
                 .mapToInt(Node::index)
+                .toArray();
+    }
+
+    private BigInteger fundamental(int node) {
+        labels[node] = 1;
+        BigInteger dimension = dimension();
+        labels[node] = 0;
+        return dimension;
+    }
+
+    /** One more than the height of the highest root, and of the highest coroot (Bourbaki, plates, item II). */
+    private static int coxeterNumber(SimpleAlgebra algebra) {
+        int rank = algebra.rank();
+        return switch (algebra.series()) {
+            case A -> rank + 1;
+            case B, C -> 2 * rank;
+            case D -> 2 * rank - 2;
+            case E -> rank == 6 ? 12 : rank == 7 ? 18 : 30;
+            case F -> 12;
+            case G -> 6;
+        };
+    }
+
+    private static int[] primesBelow(int limit) {
+        return IntStream.range(2, limit)
+                .filter(number -> IntStream.range(2, number).noneMatch(divisor -> number % divisor == 0))
                 .toArray();
     }
 
@@ -91,18 +140,34 @@ final class IrrepSearch {
     /** Labels at the nodes before this position are set; those from here on are 0. */
     private void findExactly(int position) {
         int node = nodes[position];
+        int most = largestWithin(node);
         if (position == nodes.length - 1) {
-            labels[node] = largestWithin(node);
+            labels[node] = most;
             if (dimension().equals(bound)) {
                 found.add(DominantWeight.of(labels));
             }
         } else {
-            while (dimension().compareTo(bound) <= 0) {
-                findExactly(position + 1);
-                labels[node]++;
+            steps = Math.addExact(steps, most);
+            budget.spend(most);
+            for (int label = 0; label <= most; label++) {
+                if (canBeFactor(label + 1)) {
+                    labels[node] = label;
+                    findExactly(position + 1);
+                }
             }
         }
         labels[node] = 0;
+    }
+
+    /** Whether the number, freed from all primes that Weyl's denominator can hold, divides the dimension. */
+    private boolean canBeFactor(int number) {
+        int free = number;
+        for (int prime : denominatorPrimes) {
+            while (free % prime == 0) {
+                free /= prime;
+            }
+        }
+        return free == 1 || bound.mod(BigInteger.valueOf(free)).signum() == 0;
     }
 
     private void findAll(int position) {

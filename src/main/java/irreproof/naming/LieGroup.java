@@ -57,8 +57,15 @@ public record LieGroup(String display, Family family, int degree, SimpleAlgebra 
         return new LieGroup("Sp(" + degree + ")", Family.SP, degree, algebra);
     }
 
-    /** E6, E7, E8, F4 or G2. */
+    /** E6, E7, E8, F4 or G2. @throws IllegalArgumentException for anything else */
     public static LieGroup exceptional(Series series, int rank) {
+        boolean classical = switch (series) {
+            case A, B, C, D -> true;
+            case E, F, G -> false;
+        };
+        if (classical) {
+            throw new IllegalArgumentException("" + series + rank + " is not exceptional");
+        }
         return new LieGroup("" + series + rank, Family.EXCEPTIONAL, rank, new SimpleAlgebra(series, rank));
     }
 

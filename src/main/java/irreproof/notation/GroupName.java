@@ -19,7 +19,8 @@ public record GroupName(List<Factor> factors, Span span) {
      * One factor. {@code SU(3)_C} is family {@code SU}, arguments {@code [3]}, label {@code C}; {@code su(3)} is the
      * same with {@code algebra} set; {@code E_{7(7)}} is family {@code E}, arguments {@code [7]}; {@code SO(1,9)} is
      * family {@code SO}, arguments {@code [1, 9]}; {@code D_{3h}} is family {@code D}, arguments {@code [3]}, suffix
-     * {@code h}; {@code SU(N)} is family {@code SU} without arguments.
+     * {@code h}; {@code SL(2,\mathbb{C})} is family {@code SL}, arguments {@code [2]}, suffix {@code C} (so too
+     * {@code R} and {@code H}); {@code SU(N)} is family {@code SU} without arguments.
      *
      * @param family upper-case as the group is written: SU, SO, Sp, USp, Spin, SL, GL, U, O, E, F, G, A, B, C, D, S, T,
      *     I, Z, Q, ...

@@ -4,6 +4,7 @@ import static org.junit.jupiter.api.Assertions.assertEquals;
 import static org.junit.jupiter.api.Assertions.assertInstanceOf;
 import static org.junit.jupiter.api.Assertions.assertThrows;
 
+import irreproof.engine.lie.Series;
 import irreproof.notation.GroupName;
 import irreproof.notation.GroupName.Factor;
 import irreproof.text.Span;
@@ -107,6 +108,8 @@ class GroupsTest {
         assertThrows(IllegalArgumentException.class, () -> LieGroup.su(1));
         assertThrows(IllegalArgumentException.class, () -> LieGroup.so(4));
         assertThrows(IllegalArgumentException.class, () -> LieGroup.sp(5));
+        assertThrows(IllegalArgumentException.class, () -> LieGroup.exceptional(Series.A, 4));
+        assertThrows(IllegalArgumentException.class, () -> LieGroup.exceptional(Series.E, 9));
     }
 
     private static GroupName name(Factor... factors) {

@@ -1,0 +1,289 @@
+package irreproof.latex;
+
+import irreproof.text.Span;
+import java.util.ArrayDeque;
+import java.util.ArrayList;
+import java.util.BitSet;
+import java.util.Deque;
+import java.util.List;
+import java.util.Set;
+
+/**
+ * Collects the tokens of one passage up to its end and cuts them into rows. A passage that does not close ends at the
+ * paragraph, at the next display or heading, so that one missing dollar costs one passage; a table may hold paragraphs.
+ */
+final class PassageReader {
+    private static final Set<String> TEXT_COMMANDS = Set.of(
+            "text",
+            "mbox",
+            "hbox",
+            "textrm",
+            "textbf",
+            "textit",
+            "textsf",
+            "textnormal",
+            "intertext",
+            "shortintertext",
+            "makebox",
+            "fbox",
+            "multicolumn",
+            "footnote",
+            "tag",
+            "parbox",
+            "raisebox",
+            "textcolor");
+    private static final Set<String> NEVER_INSIDE = Set.of(
+            "part", "chapter", "section", "subsection", "subsubsection", "paragraph", "bibliography", "maketitle");
+
+    private final Expander expander;
+    private final Flattener prose;
+    private final String environment;
+    private final boolean table;
+    private final List<Token> tokens = new ArrayList<>();
+    private final Deque<String> environments = new ArrayDeque<>();
+    /** For each open group, whether it holds text, where a dollar opens mathematics. */
+    private final BitSet textGroups = new BitSet();
+
+    private int depth;
+    private boolean textNext;
+    private boolean shifted;
+    private Span span;
+    private boolean closed;
+
+    PassageReader(Expander expander, Flattener prose, Token opener, String environment) {
+        this.expander = expander;
+        this.prose = prose;
+        this.environment = environment;
+        this.table = MathEnvironments.isTable(environment);
+        span = opener.span();
+    }
+
+    /** Reads to the passage's end; null if there is nothing in it or its expansion had to be given up. */
+    Passage read() {
+        expander.takeFailure();
+        int groupsBefore = expander.macros().openGroups();
+        mathMode(!table);
+        if (!isShift()) {
+            environments.push(environment);
+            skipArguments(environment, false);
+        }
+        Token token = expander.next();
+        while (token != null && accept(token)) {
+            token = expander.next();
+        }
+        mathMode(false);
+        while (expander.macros().openGroups() > groupsBefore) {
+            expander.macros().closeGroup();
+        }
+        if (expander.takeFailure() || tokens.isEmpty()) {
+            return null;
+        }
+        List<Row> rows = RowSplitter.split(tokens, table);
+        return rows.isEmpty() ? null : new Passage(layout(), environment, rows, span);
+    }
+
+    /** False if the passage met something that cannot stand in it. */
+    boolean isClosed() {
+        return closed;
+    }
+
+    Span span() {
+        return span;
+    }
+
+    private Passage.Layout layout() {
+        if (table) {
+            return Passage.Layout.TABLE;
+        }
+        boolean inline = environment.equals("$") || environment.equals("\\(") || environment.equals("math");
+        return inline ? Passage.Layout.INLINE : Passage.Layout.DISPLAY;
+    }
+
+    private boolean isShift() {
+        return environment.equals("$")
+                || environment.equals("\\(")
+                || environment.equals("$$")
+                || environment.equals("\\[");
+    }
+
+    private void mathMode(boolean on) {
+        expander.mathMode(on);
+        prose.mathMode(on);
+    }
+
+    /** Takes one token in; false if the passage ended. */
+    private boolean accept(Token token) {
+        boolean text = textNext;
+        textNext = false;
+        switch (token.kind()) {
+            case INLINE_SHIFT:
+                return inlineShift(token);
+            case DISPLAY_SHIFT:
+                return displayShift(token);
+            case PARAGRAPH_BREAK:
+                if (table || inText()) {
+                    break;
+                }
+                expander.push(token);
+                return false;
+            case BEGIN_GROUP:
+                textGroups.set(depth++, text || inText());
+                expander.macros().openGroup();
+                break;
+            case END_GROUP:
+                if (depth > 0) {
+                    depth--;
+                    expander.macros().closeGroup();
+                }
+                break;
+            case SPACE:
+                textNext = text;
+                break;
+            case CONTROL_WORD:
+                return word(token);
+            default:
+                break;
+        }
+        add(token);
+        return true;
+    }
+
+    private boolean inText() {
+        return depth > 0 && textGroups.get(depth - 1);
+    }
+
+    private void add(Token token) {
+        span = span.cover(token.span());
+        tokens.add(token);
+        prose.accept(token);
+    }
+
+    private boolean inlineShift(Token token) {
+        if (table || inText()) {
+            shifted = !shifted;
+            mathMode(shifted);
+            add(token);
+            return true;
+        }
+        if (environment.equals("$") || environment.equals("\\(")) {
+            return close(token);
+        }
+        return true;
+    }
+
+    private boolean displayShift(Token token) {
+        if (table) {
+            add(token);
+            return true;
+        }
+        if (environment.equals("$") && token.text().equals("$$")) {
+            // two inline formulas without anything between them
+            Span place = token.span();
+            boolean ownCharacters = place.length() == 2;
+            Span second = ownCharacters ? new Span(place.start() + 1, place.end()) : place;
+            expander.push(new Token(TokenKind.INLINE_SHIFT, "$", second));
+            return close(token.at(ownCharacters ? new Span(place.start(), place.start() + 1) : place));
+        }
+        boolean closes = environment.equals("$$") && token.text().equals("$$")
+                || environment.equals("\\[") && token.text().equals("\\]");
+        if (closes) {
+            return close(token);
+        }
+        expander.push(token);
+        return false;
+    }
+
+    private boolean close(Token token) {
+        span = span.cover(token.span());
+        closed = true;
+        return false;
+    }
+
+    private boolean word(Token token) {
+        String name = token.text();
+        if (name.equals("begin")) {
+            return begin(token);
+        }
+        if (name.equals("end")) {
+            return end(token);
+        }
+        if (NEVER_INSIDE.contains(name)) {
+            expander.push(token);
+            return false;
+        }
+        textNext = TEXT_COMMANDS.contains(name);
+        add(token);
+        return true;
+    }
+
+    private boolean begin(Token token) {
+        String name = expander.arguments().name();
+        if (name == null) {
+            return true;
+        }
+        List<Token> taken = expander.arguments().lastTaken();
+        boolean misplaced = MathEnvironments.isDisplay(name) && !table;
+        if (misplaced) {
+            expander.push(taken);
+            expander.push(token);
+            return false;
+        }
+        environments.push(name);
+        silently(token);
+        taken.forEach(this::silently);
+        skipArguments(name, true);
+        expander.macros().openGroup();
+        return true;
+    }
+
+    private boolean end(Token token) {
+        String name = expander.arguments().name();
+        List<Token> taken = expander.arguments().lastTaken();
+        if (name == null) {
+            return true;
+        }
+        boolean innermost = environments.contains(name);
+        while (innermost && !environments.isEmpty() && !environments.peek().equals(name)) {
+            environments.pop();
+        }
+        if (innermost) {
+            environments.pop();
+        }
+        Span end = token.span();
+        for (Token part : taken) {
+            end = end.cover(part.span());
+        }
+        if (innermost && environments.isEmpty() && !isShift()) {
+            return close(token.at(end));
+        }
+        if (!innermost) {
+            if (!MathEnvironments.isDisplay(name)) {
+                expander.push(taken);
+                expander.push(token);
+            }
+            return false;
+        }
+        expander.macros().closeGroup();
+        silently(token);
+        taken.forEach(this::silently);
+        return true;
+    }
+
+    /** Takes a token in that the prose does not show. */
+    private void silently(Token token) {
+        span = span.cover(token.span());
+        tokens.add(token);
+    }
+
+    private void skipArguments(String name, boolean keep) {
+        for (char kind : MathEnvironments.arguments(name).toCharArray()) {
+            boolean found = (kind == 'o'
+                            ? expander.arguments().optional()
+                            : expander.arguments().mandatory())
+                    != null;
+            if (found && keep) {
+                expander.arguments().lastTaken().forEach(this::silently);
+            }
+        }
+    }
+}
