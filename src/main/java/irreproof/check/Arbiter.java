@@ -72,7 +72,7 @@ final class Arbiter {
             }
             Trial trial = judge(statement, candidate, simple);
             trials.add(trial);
-            if (trial.is(Outcome.UNDECIDED)) {
+            if (trial.is(Outcome.UNDECIDED) && trials.stream().noneMatch(other -> other.is(Outcome.FAILS))) {
                 return settled(trial, Verdict.UNDECIDED, trial.judgement().reason());
             }
             if (trial.is(Outcome.HOLDS)) {
@@ -127,7 +127,10 @@ final class Arbiter {
         if (failed.setting().factor()) {
             return settled(failed, Verdict.UNDECIDED, "it may be about another factor of the group");
         }
-        if (!declared) {
+        boolean weak = near == Nearness.HEADING
+                || near == Nearness.DOCUMENT
+                || !declared && !failed.judgement().unknownNames().isEmpty();
+        if (weak) {
             Optional<Trial> other =
                     Inference.firstThatHolds(group -> judge(statement, null, group), Trial::holdsAsUsual);
             if (other.isPresent()) {
@@ -161,7 +164,9 @@ final class Arbiter {
         if (inferred.isPresent()) {
             return settled(inferred.get(), Verdict.HOLDS, "");
         }
-        String reason = "no group named in the text has irreps of these dimensions";
+        String reason = nearest.judgement().reason().isEmpty()
+                ? "no group named in the text has irreps of these dimensions"
+                : nearest.judgement().reason();
         return Ruling.undecided(
                 reason, nearest.setting(), nearest.setting().near().source());
     }

@@ -36,7 +36,9 @@ public final class Derivation {
      */
     public static Result derive(String latex, String group, Budget budget) {
         String typed = latex.strip().replaceAll("=\\s*$", "").strip();
-        List<Statement> statements = StatementFinder.find(typed, Reader.passage(typed), budget);
+        List<Statement> statements = Reader.passage(typed)
+                .map(passage -> StatementFinder.find(typed, passage, budget))
+                .orElse(List.of());
         if (statements.isEmpty()) {
             return new Result(false, "no product or sum of irreps can be read in " + latex.strip());
         }

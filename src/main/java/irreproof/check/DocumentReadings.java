@@ -33,6 +33,7 @@ final class DocumentReadings {
 
     private final List<Case> cases;
     private final List<List<Finding>> findings = new ArrayList<>();
+    private final Set<Object> said = new HashSet<>();
 
     private DocumentReadings(List<Case> cases) {
         this.cases = cases;
@@ -62,6 +63,7 @@ final class DocumentReadings {
             Map<Decomposition<DominantWeight>, Long> votes = new HashMap<>();
             list.forEach(need -> votes.merge(need.meaning(), 2L + (need.usual() ? 1 : 0), Long::sum));
             if (votes.size() > 1) {
+                said.add(key);
                 long most =
                         votes.values().stream().mapToLong(Long::longValue).max().orElse(0);
                 Need leader = list.stream()
@@ -102,7 +104,6 @@ final class DocumentReadings {
     }
 
     private void adviseUnusual() {
-        Set<Object> said = new HashSet<>();
         for (int i = 0; i < cases.size(); i++) {
             Case subject = cases.get(i);
             if (!holds(subject)) {

@@ -1,8 +1,8 @@
 package irreproof.check;
 
 import irreproof.notation.Expression.Name;
-import java.util.ArrayList;
 import java.util.List;
+import java.util.stream.Collectors;
 
 /** A name that no irrep of the group can have. */
 final class NoSuchIrrep implements StatementRule {
@@ -21,12 +21,12 @@ final class NoSuchIrrep implements StatementRule {
         if (subject.ruling().verdict() != Verdict.FAILS || subject.ruling().judgement() == null) {
             return List.of();
         }
-        List<Finding> findings = new ArrayList<>();
-        for (Name name : subject.ruling().judgement().unknownNames()) {
-            String message = subject.ruling().settingName() + " has no irrep "
-                    + subject.wording().written(name);
-            findings.add(subject.finding(this, name.span(), message, List.of(), List.of()));
+        List<Name> names = subject.ruling().judgement().unknownNames();
+        if (names.isEmpty()) {
+            return List.of();
         }
-        return findings;
+        String list = names.stream().map(subject.wording()::written).distinct().collect(Collectors.joining(", "));
+        String message = subject.ruling().settingName() + " has no irrep " + list;
+        return List.of(subject.finding(this, names.get(0).span(), message, List.of(), List.of()));
     }
 }

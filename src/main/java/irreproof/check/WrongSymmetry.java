@@ -2,7 +2,6 @@ package irreproof.check;
 
 import irreproof.check.judge.Judgement.WrongPart;
 import irreproof.notation.Expression.Symmetry;
-import java.util.ArrayList;
 import java.util.List;
 
 /** A term of a square is marked symmetric or antisymmetric and is not. */
@@ -22,13 +21,20 @@ final class WrongSymmetry implements StatementRule {
         if (subject.ruling().verdict() != Verdict.FAILS || subject.ruling().judgement() == null) {
             return List.of();
         }
-        List<Finding> findings = new ArrayList<>();
-        for (WrongPart part : subject.ruling().judgement().wrongParts()) {
-            String message = subject.wording().written(part.term()) + " does not lie in the " + word(part.claimed())
-                    + " part of the square";
-            findings.add(subject.finding(this, part.term().span(), message, List.of(), List.of()));
+        List<WrongPart> parts = subject.ruling().judgement().wrongParts();
+        if (parts.isEmpty()) {
+            return List.of();
         }
-        return findings;
+        List<String> messages = parts.stream()
+                .map(part -> subject.wording().written(part.term()) + " does not lie in the " + word(part.claimed())
+                        + " part of the square")
+                .toList();
+        return List.of(subject.finding(
+                this,
+                parts.get(0).term().span(),
+                messages.get(0),
+                messages.subList(1, messages.size()),
+                List.of()));
     }
 
     private static String word(Symmetry symmetry) {

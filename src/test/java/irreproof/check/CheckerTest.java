@@ -71,10 +71,9 @@ class CheckerTest {
 
     @Test
     void readsOtherConventionsWithAdvice() {
-        checks(
-                """
+        checks("""
                 In $SO(10)$ one has $\\mathbf{16}\\otimes\\mathbf{16}=\\mathbf{10}\\oplus\\mathbf{120}\\oplus\\overline{\\mathbf{126}}$.
-                                                                                                          ^^^^^^^^^^^^^^^^^^^^^^^ unusual-name
+                                                                                                      ^^^^^^^^^^^^^^^^^^^^^^^ unusual-name
                 """);
     }
 
@@ -90,8 +89,7 @@ class CheckerTest {
                 .statements()
                 .get(0);
         assertEquals(SettingSource.HEADING, heading.settingSource());
-        StatementReport directive = report(
-                        "% irreproof: group SU(3)\nIn $SU(5)$, $3\\otimes\\bar3=8\\oplus1$.\n", "")
+        StatementReport directive = report("% irreproof: group SU(3)\nIn $SU(5)$, $3\\otimes\\bar3=8\\oplus1$.\n", "")
                 .statements()
                 .get(0);
         assertEquals(SettingSource.DIRECTIVE, directive.settingSource());
@@ -100,7 +98,9 @@ class CheckerTest {
 
     @Test
     void infersTheOnlyGroupInWhichAStatementHolds() {
-        StatementReport statement = only("", "\\mathbf{7}\\otimes\\mathbf{7}=\\mathbf{1}\\oplus\\mathbf{7}\\oplus\\mathbf{14}\\oplus\\mathbf{27}");
+        StatementReport statement = only(
+                "",
+                "\\mathbf{7}\\otimes\\mathbf{7}=\\mathbf{1}\\oplus\\mathbf{7}\\oplus\\mathbf{14}\\oplus\\mathbf{27}");
         assertEquals(Verdict.HOLDS, statement.verdict());
         assertEquals("G2", statement.setting());
         assertEquals(SettingSource.INFERRED, statement.settingSource());
@@ -108,15 +108,21 @@ class CheckerTest {
 
     @Test
     void staysUndecidedWhereItCannotKnow() {
-        assertEquals(Verdict.UNDECIDED, only("A_4", "3\\otimes3=1\\oplus1'\\oplus1''\\oplus3\\oplus3").verdict());
-        assertEquals(Verdict.UNDECIDED, only("E_6", "\\mathbf{27}\\to\\mathbf{16}\\oplus\\mathbf{10}\\oplus\\mathbf{1}").verdict());
-        assertEquals(Verdict.UNDECIDED, only("SU(3)", "\\mathbf{3}\\otimes\\mathbf{3}\\to\\mathbf{6}").verdict());
+        assertEquals(
+                Verdict.UNDECIDED,
+                only("A_4", "3\\otimes3=1\\oplus1'\\oplus1''\\oplus3\\oplus3").verdict());
+        assertEquals(
+                Verdict.UNDECIDED,
+                only("E_6", "\\mathbf{27}\\to\\mathbf{16}\\oplus\\mathbf{10}\\oplus\\mathbf{1}")
+                        .verdict());
+        assertEquals(
+                Verdict.UNDECIDED,
+                only("SU(3)", "\\mathbf{3}\\otimes\\mathbf{3}\\to\\mathbf{6}").verdict());
     }
 
     @Test
     void directivesSuppressPauseAndComplain() {
-        checks(
-                """
+        checks("""
                 In $SU(3)$:
                 % irreproof: allow dimension-mismatch
                 $3\\otimes3=6$
@@ -134,8 +140,7 @@ class CheckerTest {
 
     @Test
     void declaredNamesAreTaken() {
-        checks(
-                """
+        checks("""
                 % irreproof: name 126 = (0,0,0,2,0)
                 In $SO(10)$, $\\mathbf{16}\\otimes\\mathbf{16}=\\mathbf{10}\\oplus\\mathbf{120}\\oplus\\overline{\\mathbf{126}}$.
                 """);
@@ -143,7 +148,8 @@ class CheckerTest {
 
     @Test
     void theFixMendsTheStatement() {
-        String source = "In $SU(3)$, $\\rep{8}\\otimes\\rep{8}=\\rep{27}\\oplus\\rep{10}\\oplus\\bar{\\rep{10}}\\oplus\\rep{8}\\oplus\\rep{1}$.\n";
+        String source =
+                "In $SU(3)$, $\\rep{8}\\otimes\\rep{8}=\\rep{27}\\oplus\\rep{10}\\oplus\\bar{\\rep{10}}\\oplus\\rep{8}\\oplus\\rep{1}$.\n";
         Map<String, String> files = Map.of("m", "\\newcommand{\\rep}[1]{\\mathbf{#1}}");
         FileReport before = report("\\input{m}" + source, "", files);
         Finding finding = before.allFindings().get(0);

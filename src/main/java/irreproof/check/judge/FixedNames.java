@@ -1,6 +1,5 @@
 package irreproof.check.judge;
 
-import irreproof.budget.Budget;
 import irreproof.engine.lie.CongruenceClass;
 import irreproof.engine.lie.Conjugation;
 import irreproof.engine.lie.DominantWeight;
@@ -17,7 +16,7 @@ final class FixedNames {
     private FixedNames() {}
 
     /** True if the irrep is never called by its dimension name without the bar. */
-    static boolean excludes(LieGroup group, DominantWeight irrep, Budget budget) {
+    static boolean excludes(LieGroup group, DominantWeight irrep) {
         DominantWeight conjugate = Conjugation.conjugate(group.algebra(), irrep);
         if (conjugate.equals(irrep)) {
             return false;
@@ -26,7 +25,8 @@ final class FixedNames {
             case A ->
                 barredByClass(group, irrep, conjugate) && barredByBoxes(irrep, conjugate)
                         || isSquareOfDefining(conjugate);
-            case D, E -> isFundamental(irrep) && barredByClass(group, irrep, conjugate);
+            case D -> isFundamental(irrep) && barredByClass(group, irrep, conjugate);
+            case E -> isEndOfChain(irrep) && barredByClass(group, irrep, conjugate);
             case B, C, F, G -> false;
         };
     }
@@ -55,6 +55,11 @@ final class FixedNames {
     private static boolean isSquareOfDefining(DominantWeight irrep) {
         int[] labels = irrep.labels();
         return labels[0] == 2 && Arrays.stream(labels).sum() == 2;
+    }
+
+    /** The 27 of E6 and its conjugate. */
+    private static boolean isEndOfChain(DominantWeight irrep) {
+        return isFundamental(irrep) && irrep.label(0) + irrep.label(irrep.rank() - 1) == 1;
     }
 
     private static boolean isFundamental(DominantWeight irrep) {

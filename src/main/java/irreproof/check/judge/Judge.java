@@ -11,6 +11,7 @@ import irreproof.notation.Statement;
 import java.util.ArrayList;
 import java.util.Comparator;
 import java.util.List;
+import java.util.Optional;
 
 /**
  * Decides one statement in one setting: holds if some consistent reading makes every comparison true, fails if none
@@ -18,6 +19,12 @@ import java.util.List;
  * engine's products are cached there.
  */
 public final class Judge<I extends Comparable<? super I>> {
+    /** A name without a meaning is further from holding than many wrong terms. */
+    private static final long UNKNOWN = 1000;
+
+    /** Among how many failing readings the one nearest to holding is looked for. */
+    private static final int REPORTED = 12;
+
     private final Statement statement;
     private final Lexicon<I> lexicon;
     private final Budget budget;
@@ -37,7 +44,9 @@ public final class Judge<I extends Comparable<? super I>> {
         try {
             return new Judge<>(statement, lexicon, budget).judge();
         } catch (Undecidable reason) {
-            return Judgement.undecided(reason.getMessage());
+            return reason.isOtherGroup()
+                    ? Judgement.notItsGroup(reason.getMessage(), List.of())
+                    : Judgement.undecided(reason.getMessage());
         } catch (BudgetExceeded reason) {
             if (reason.reason() == BudgetExceeded.Cause.CANCELLED) {
                 throw reason;
@@ -60,21 +69,24 @@ public final class Judge<I extends Comparable<? super I>> {
         Judgement<I> best = null;
         boolean truncated = false;
         for (Interpretation interpretation : lexicon.interpretations(names)) {
-            Readings<I> readings = new Readings<>(lexicon, interpretation, names, budget);
+            Readings<I> readings = Readings.of(lexicon, interpretation, names, budget);
             if (!readings.unknown().isEmpty()) {
                 failures.add(unknown(readings.unknown()));
                 continue;
             }
-            List<Reading<I>> all = readings.all();
-            truncated |= readings.truncated();
-            for (Reading<I> reading : all) {
+            Readings<I> possible = new Pruning<>(statement, lexicon, budget).prune(readings, links);
+            boolean held = false;
+            for (Reading<I> reading : possible.all(Readings.MOST)) {
                 Judgement<I> judgement = evaluate(reading);
                 if (judgement.outcome() == Outcome.HOLDS) {
+                    held = true;
                     satisfying.add(reading);
                     best = best == null || reading.unusual() < best.reading().unusual() ? judgement : best;
-                } else {
-                    failures.add(judgement);
                 }
+            }
+            truncated |= possible.truncated();
+            if (!held) {
+                readings.all(REPORTED).forEach(reading -> failures.add(evaluate(reading)));
             }
         }
         if (best != null) {
@@ -89,10 +101,14 @@ public final class Judge<I extends Comparable<? super I>> {
                     List.of());
         }
         Judgement<I> nearest = failures.stream()
-                .min(Comparator.comparingInt(Judge::badness))
+                .min(Comparator.comparingLong(Judge::badness))
                 .orElseGet(() -> Judgement.undecided("its names have no common meaning in this group"));
-        if (truncated && !differInDimension(nearest)) {
-            return Judgement.undecided("its names can be read in too many ways");
+        if (nearest.outcome() == Outcome.FAILS && !differInDimension(nearest)) {
+            Optional<String> doubt =
+                    truncated ? Optional.of("its names can be read in too many ways") : lexicon.doubt(names);
+            if (doubt.isPresent()) {
+                return Judgement.undecided(doubt.get());
+            }
         }
         return nearest;
     }
@@ -107,37 +123,36 @@ public final class Judge<I extends Comparable<? super I>> {
     }
 
     /** Of several failures, the one that is nearest to holding is what the author meant. */
-    private static int badness(Judgement<?> failure) {
-        int names = failure.outcome() == Outcome.NOT_ITS_GROUP
-                ? 1000
-                : 100 * failure.unknownNames().size();
-        int wrong = failure.comparisons().stream().mapToInt(Judge::distance).sum();
-        int unusual = failure.reading() == null ? 0 : failure.reading().unusual();
-        int undecided = failure.outcome() == Outcome.UNDECIDED ? -1_000_000 : 0;
-        return undecided
-                + names
-                + 10 * unusual
-                + Math.min(wrong, 9)
-                + failure.wrongParts().size();
+    private static long badness(Judgement<?> failure) {
+        return switch (failure.outcome()) {
+            case UNDECIDED -> -1;
+            case HOLDS, FAILS ->
+                failure.comparisons().stream().mapToLong(Judge::distance).sum()
+                        + failure.wrongParts().size()
+                        + (failure.reading() == null
+                                ? UNKNOWN * failure.unknownNames().size()
+                                : failure.reading().unusual());
+            case NOT_ITS_GROUP -> Long.MAX_VALUE;
+        };
     }
 
-    private static int distance(Comparison<?> comparison) {
-        return comparison.holds() ? 0 : 1;
+    private static long distance(Comparison<?> comparison) {
+        return comparison.holds() ? 0 : 1 + size(comparison.missing()) + size(comparison.surplus());
+    }
+
+    private static long size(Decomposition<?> sum) {
+        return sum.multiplicities().values().stream()
+                .mapToLong(count -> Math.min(count, UNKNOWN))
+                .sum();
     }
 
     private Judgement<I> unknown(List<Name> unknown) {
         Expression deciding = statement.sides().get(Chain.reference(statement));
         List<Name> ofDeciding = Names.of(deciding);
-        boolean otherGroup = !Names.multiplies(deciding) || unknown.stream().anyMatch(ofDeciding::contains);
-        return new Judgement<>(
-                otherGroup ? Outcome.NOT_ITS_GROUP : Outcome.FAILS,
-                "",
-                null,
-                List.of(),
-                List.of(),
-                List.of(),
-                unknown,
-                List.of());
+        if (!Names.multiplies(deciding) || unknown.stream().anyMatch(ofDeciding::contains)) {
+            return Judgement.notItsGroup("", unknown);
+        }
+        return new Judgement<>(Outcome.FAILS, "", null, List.of(), List.of(), List.of(), unknown, List.of());
     }
 
     private Judgement<I> evaluate(Reading<I> reading) {

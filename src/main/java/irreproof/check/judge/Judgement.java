@@ -9,7 +9,7 @@ import java.util.List;
  * What came of judging one statement in one setting.
  *
  * @param outcome what is claimed
- * @param reason why it is undecided; empty otherwise
+ * @param reason why it is undecided, or what in the form of the names does not fit the group; or empty
  * @param reading the reading that makes it hold; for a failure the most usual reading; null if names have no meaning
  * @param comparisons under that reading, in the order of the sides
  * @param values what each side lists under that reading; empty if there is none
@@ -48,5 +48,11 @@ public record Judgement<I extends Comparable<? super I>>(
 
     static <I extends Comparable<? super I>> Judgement<I> undecided(String reason) {
         return new Judgement<>(Outcome.UNDECIDED, reason, null, List.of(), List.of(), List.of(), List.of(), List.of());
+    }
+
+    /** @param reason what in the form of the names does not fit the group, or empty */
+    static <I extends Comparable<? super I>> Judgement<I> notItsGroup(String reason, List<Expression.Name> unknown) {
+        return new Judgement<>(
+                Outcome.NOT_ITS_GROUP, reason, null, List.of(), List.of(), List.of(), unknown, List.of());
     }
 }

@@ -6,6 +6,7 @@ import irreproof.notation.Expression.Name;
 import irreproof.notation.Expression.Symmetry;
 import java.util.Collection;
 import java.util.List;
+import java.util.Optional;
 
 /**
  * What names mean in one setting: joins the notation, which knows no mathematics, to a group's irreps.
@@ -31,6 +32,9 @@ public interface Lexicon<I extends Comparable<? super I>> {
      * @throws irreproof.budget.BudgetExceeded if the search is too large
      */
     List<Candidate<I>> candidates(Name name, Interpretation interpretation, Budget budget);
+
+    /** Why a failure would not be certain with these names, beyond the readings that were tried; mostly empty. */
+    Optional<String> doubt(Collection<Name> names);
 
     /** The part of a square that a subscript of the name claims, or null if it claims none (or is part of the name). */
     Symmetry claimedPart(Name name);

@@ -81,7 +81,7 @@ public final class LieLexicon implements Lexicon<DominantWeight> {
             }
         }
         if (senses.isEmpty()) {
-            throw new Undecidable("0 and fractions are not names of irreps of " + group.display());
+            throw Undecidable.otherGroup("0 and fractions are not names of irreps of " + group.display());
         }
         return senses;
     }
@@ -101,7 +101,7 @@ public final class LieLexicon implements Lexicon<DominantWeight> {
                     throw new Undecidable("irreps of product groups and charges are not judged yet");
                 }
                 if (senses.isEmpty()) {
-                    throw new Undecidable("a list of " + list.entries().size() + " entries does not name an irrep of "
+                    throw Undecidable.otherGroup("a list of " + list.entries().size() + " entries does not name an irrep of "
                             + group.display());
                 }
             }
@@ -128,17 +128,13 @@ public final class LieLexicon implements Lexicon<DominantWeight> {
             String fraction = number.denominator() == 1 ? "" : "/" + number.denominator();
             String dimension = number.numerator() + fraction;
             boolean spin = interpretation.numbers() == Numbers.SPIN;
-            String primes = "'".repeat(number.decoration().primes());
-            return new NameKey(spin ? "" : dimension, dimension + primes + suffix(number));
+            int primes = number.decoration().primes();
+            return new NameKey(spin ? "" : dimension, primes, dimension + "'".repeat(primes) + suffix(number));
         }
         if (name instanceof ListName list) {
-            return new NameKey(
-                    "",
-                    list.bracket()
-                            + list.entries().toString()
-                            + list.decoration().label());
+            return new NameKey("", 0, BracketNames.text(list));
         }
-        return new NameKey("", "diagram " + ((DiagramName) name).rows());
+        return new NameKey("", 0, "diagram " + ((DiagramName) name).rows());
     }
 
     /** A subscript that is part of the name: those of SO(8) and of chiral spinors; elsewhere a mere label. */
@@ -172,7 +168,7 @@ public final class LieLexicon implements Lexicon<DominantWeight> {
         List<Candidate<DominantWeight>> result = new ArrayList<>();
         for (var candidate : dimensionNames.candidates(number.numerator(), 0, primes, suffix(number), budget)) {
             int unusual = candidate.custom().ordinal();
-            if (candidate.custom() == Custom.TABLES || !FixedNames.excludes(group, candidate.irrep(), budget)) {
+            if (candidate.custom() == Custom.TABLES || !FixedNames.excludes(group, candidate.irrep())) {
                 result.add(new Candidate<>(Decomposition.of(candidate.irrep()), unusual));
             }
         }
@@ -191,6 +187,15 @@ public final class LieLexicon implements Lexicon<DominantWeight> {
         return Decomposition.sum(sum.multiplicities().keySet().stream()
                 .map(irrep -> Conjugation.conjugate(group.algebra(), irrep))
                 .toList());
+    }
+
+    @Override
+    public Optional<String> doubt(Collection<Name> names) {
+        boolean numbered =
+                group.family() == LieGroup.Family.EXCEPTIONAL && names.stream().anyMatch(ListName.class::isInstance);
+        return numbered
+                ? Optional.of("authors number the nodes of " + group.display() + " in several ways")
+                : Optional.empty();
     }
 
     @Override
