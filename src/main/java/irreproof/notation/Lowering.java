@@ -147,7 +147,7 @@ final class Lowering {
         int next = i;
         int end = i;
         while (next < to
-                && (tape.at(next).kind() == TokenKind.DIGIT || tape.at(next).kind() == TokenKind.SPACE)) {
+                && (tape.at(next).kind() == TokenKind.DIGIT || tape.isBlank(next))) {
             if (tape.at(next).kind() == TokenKind.DIGIT) {
                 digits.append(tape.at(next).text());
                 end = next + 1;

@@ -60,9 +60,16 @@ final class TokenTape {
         return closers[index];
     }
 
+    /** White space that prints nothing; a tie does print a space. */
+    boolean isBlank(int index) {
+        Token token = at(index);
+        return token.kind() == TokenKind.COMMENT
+                || token.kind() == TokenKind.SPACE && !token.text().equals("~");
+    }
+
     int skipSpaces(int index, int end) {
         int i = index;
-        while (i < end && (at(i).kind() == TokenKind.SPACE || at(i).kind() == TokenKind.COMMENT)) {
+        while (i < end && isBlank(i)) {
             i++;
         }
         return i;

@@ -106,7 +106,7 @@ final class YoungReader {
                 }
             } else if (tape.at(i).isWord("none")) {
                 offset = true;
-            } else if (tape.at(i).kind() != TokenKind.SPACE) {
+            } else if (!tape.isBlank(i)) {
                 filled = true;
             }
             filled &= !rowEnd;
@@ -142,7 +142,7 @@ final class YoungReader {
                 digits.setLength(0);
             } else if (tape.at(i).kind() == TokenKind.DIGIT) {
                 digits.append(tape.at(i).text());
-            } else if (tape.at(i).kind() != TokenKind.SPACE) {
+            } else if (!tape.isBlank(i)) {
                 return null;
             }
         }
@@ -161,7 +161,7 @@ final class YoungReader {
                 length = 0;
             } else if (tape.at(i).isWord("none")) {
                 return null;
-            } else if (tape.at(i).kind() != TokenKind.SPACE && tape.at(i).kind() != TokenKind.COMMENT) {
+            } else if (!tape.isBlank(i)) {
                 if (tape.at(i).kind() == TokenKind.DIGIT) {
                     filling.append(tape.at(i).text());
                 }
