@@ -146,8 +146,7 @@ final class Lowering {
         StringBuilder digits = new StringBuilder();
         int next = i;
         int end = i;
-        while (next < to
-                && (tape.at(next).kind() == TokenKind.DIGIT || tape.isBlank(next))) {
+        while (next < to && (tape.at(next).kind() == TokenKind.DIGIT || tape.isBlank(next))) {
             if (tape.at(next).kind() == TokenKind.DIGIT) {
                 digits.append(tape.at(next).text());
                 end = next + 1;
