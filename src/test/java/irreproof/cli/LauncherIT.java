@@ -11,6 +11,8 @@ import java.nio.file.Files;
 import java.nio.file.Path;
 import java.util.List;
 import java.util.Map;
+import java.util.stream.Stream;
+import org.junit.jupiter.api.AfterEach;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.api.io.TempDir;
 
@@ -20,6 +22,16 @@ class LauncherIT {
 
     @TempDir
     private Path folder;
+
+    /** Links out of the folder are taken away first: emptying it would warn of each. */
+    @AfterEach
+    void deleteLinks() throws IOException {
+        try (Stream<Path> files = Files.walk(folder)) {
+            for (Path link : files.filter(Files::isSymbolicLink).toList()) {
+                Files.delete(link);
+            }
+        }
+    }
 
     private record Run(int code, String out, String err) {}
 
@@ -89,6 +101,24 @@ class LauncherIT {
         assertEquals(127, run.code());
         assertEquals("", run.out());
         assertEquals("irreproof: no Java found: install Java 17 or newer, or set JAVA_HOME\n", run.err());
+    }
+
+    @Test
+    void anOlderJavaIsNamedAndExitsWith127() throws Exception {
+        Path old = fakeJava("old");
+        for (String version : List.of("1.8.0_412", "11.0.22", "16")) {
+            Files.writeString(old.resolve("release"), "IMPLEMENTOR=\"X\"\nJAVA_VERSION=\"" + version + "\"\n");
+            Run run = run(Map.of("IRREPROOF_JAVA_HOME", old.toString()), LAUNCHER, "check", "-");
+            String java = old.resolve("bin/java").toString();
+            String message = "irreproof: Java 17 or newer is needed, but " + java + " is Java " + version + "\n";
+            assertEquals(new Run(127, "", message), run);
+        }
+        for (String version : List.of("17", "17.0.15", "21-ea", "25.0.3")) {
+            Files.writeString(old.resolve("release"), "JAVA_VERSION=\"" + version + "\"\n");
+            assertEquals(
+                    "old\n",
+                    run(Map.of("IRREPROOF_JAVA_HOME", old.toString()), LAUNCHER).out());
+        }
     }
 
     @Test
