@@ -93,17 +93,16 @@ final class CheckCommand implements Subcommand {
         List<String> paths = new ArrayList<>(List.of(given.matchedPositionalValue(0, new String[0])));
         if (paths.removeIf(STANDARD_INPUT::equals)) {
             SourceText typed = FileReading.read(console.in(), STANDARD_INPUT);
-            tasks.add(() -> check(typed, Path.of(""), group, included));
+            tasks.add(() -> check(typed, group, included));
         }
         for (SourceFile source : FileCollector.collect(paths)) {
-            Path folder = source.file().toAbsolutePath().getParent();
-            tasks.add(() -> check(FileReading.read(source.file(), source.shown()), folder, group, included));
+            tasks.add(() -> check(FileReading.read(source.file(), source.shown()), group, included));
         }
         return tasks;
     }
 
-    private static FileReport check(SourceText source, Path rootFolder, String group, FileCache included) {
-        ProjectSources sources = new ProjectSources(rootFolder, OpenDocuments.none(), included);
+    private static FileReport check(SourceText source, String group, FileCache included) {
+        ProjectSources sources = new ProjectSources(source, OpenDocuments.none(), included);
         return Checker.check(source, new CheckOptions(group, sources, CheckOptions.DEFAULT_STEPS), Budget.unlimited());
     }
 

@@ -26,24 +26,30 @@ public final class FileCache {
         }
     };
 
-    private record Entry(long size, FileTime changed, SourceText text) {}
+    private record Entry(long size, FileTime changed, SourceText text, IncludeScan scan) {}
 
     /** Empty if there is no such regular file, or it cannot be read or is too large. */
-    public synchronized Optional<SourceText> read(Path file, String shown) {
+    Optional<SourceText> read(Path file, String shown) {
+        return entry(file).map(Entry::text).map(text -> new SourceText(shown, text.content(), text.lines()));
+    }
+
+    Optional<IncludeScan> scan(Path file) {
+        return entry(file).map(Entry::scan);
+    }
+
+    private synchronized Optional<Entry> entry(Path file) {
         try {
             BasicFileAttributes now = Files.readAttributes(file, BasicFileAttributes.class);
             if (!now.isRegularFile()) {
                 return Optional.empty();
             }
             Entry known = entries.get(file);
-            if (known == null
-                    || known.size != now.size()
-                    || !known.changed.equals(now.lastModifiedTime())
-                    || !known.text.path().equals(shown)) {
-                known = new Entry(now.size(), now.lastModifiedTime(), FileReading.read(file, shown));
+            if (known == null || known.size != now.size() || !known.changed.equals(now.lastModifiedTime())) {
+                SourceText text = FileReading.read(file, file.toString());
+                known = new Entry(now.size(), now.lastModifiedTime(), text, IncludeScan.of(text.content()));
                 entries.put(file, known);
             }
-            return Optional.of(known.text);
+            return Optional.of(known);
         } catch (IOException | UnreadableFile e) {
             return Optional.empty();
         }

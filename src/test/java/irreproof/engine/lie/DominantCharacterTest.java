@@ -7,6 +7,7 @@ import irreproof.budget.Budget;
 import irreproof.budget.BudgetExceeded;
 import irreproof.engine.Rational;
 import java.math.BigInteger;
+import java.util.Arrays;
 import java.util.HashSet;
 import java.util.Map;
 import java.util.Set;
@@ -70,7 +71,7 @@ class DominantCharacterTest {
             }
             Set<String> seen = new HashSet<>();
             WeylOrbit.forEach(system, dominant, Budget.unlimited(), weight -> {
-                assertEquals(true, seen.add(java.util.Arrays.toString(weight)));
+                assertEquals(true, seen.add(Arrays.toString(weight)));
                 int[] moved = weight.clone();
                 ChamberReflection.toDominant(system, moved);
                 assertEquals(dominant, DominantWeight.of(moved));
@@ -94,7 +95,7 @@ class DominantCharacterTest {
 
     private static String orbitOfRho(Series series, int rank) {
         int[] labels = new int[rank];
-        java.util.Arrays.fill(labels, 1);
+        Arrays.fill(labels, 1);
         return WeylOrbit.size(RootSystem.of(new SimpleAlgebra(series, rank)), DominantWeight.of(labels))
                 .toString();
     }

@@ -21,7 +21,7 @@ final class RandomIrreps {
         BigInteger limit = BigInteger.valueOf(largestDimension);
         int[] labels = new int[algebra.rank()];
         int misses = 0;
-        while (misses < 4 && random.nextInt(8) > 0) {
+        while (misses < 4 && random.nextInt(12) > 0) {
             int node = random.nextInt(labels.length);
             labels[node]++;
             if (WeylDimension.dimension(algebra, DominantWeight.of(labels)).compareTo(limit) > 0) {

@@ -1,3 +1,0 @@
-parser grammar Statement;
-tokens { NUMBER }
-statement: NUMBER EOF;

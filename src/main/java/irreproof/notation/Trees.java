@@ -1,0 +1,104 @@
+package irreproof.notation;
+
+import irreproof.notation.Expression.Conjugate;
+import irreproof.notation.Expression.Decoration;
+import irreproof.notation.Expression.DiagramName;
+import irreproof.notation.Expression.Dots;
+import irreproof.notation.Expression.Face;
+import irreproof.notation.Expression.ListName;
+import irreproof.notation.Expression.Multiple;
+import irreproof.notation.Expression.NumberName;
+import irreproof.notation.Expression.Part;
+import irreproof.notation.Expression.Power;
+import irreproof.notation.Expression.Product;
+import irreproof.notation.Expression.Sum;
+import irreproof.text.Span;
+import java.math.BigInteger;
+import java.util.List;
+
+/** Questions about trees. */
+final class Trees {
+    private Trees() {}
+
+    static List<Expression> children(Expression tree) {
+        if (tree instanceof Sum sum) {
+            return sum.terms();
+        }
+        if (tree instanceof Product product) {
+            return product.factors();
+        }
+        if (tree instanceof Multiple multiple) {
+            return List.of(multiple.body());
+        }
+        if (tree instanceof Power power) {
+            return List.of(power.base());
+        }
+        if (tree instanceof Part part) {
+            return List.of(part.body());
+        }
+        if (tree instanceof Conjugate conjugate) {
+            return List.of(conjugate.body());
+        }
+        return tree instanceof ListName list ? list.entries() : List.of();
+    }
+
+    /** A plain whole number without anything attached. */
+    static boolean isCount(Expression tree) {
+        return tree instanceof NumberName name
+                && name.face() == Face.PLAIN
+                && name.denominator() == 1
+                && name.decoration().equals(Decoration.NONE);
+    }
+
+    static BigInteger count(Expression tree) {
+        return ((NumberName) tree).numerator();
+    }
+
+    /** True if a number in front of this can only be a multiplicity: it holds a styled name, a list or a diagram. */
+    static boolean cannotBeArithmetic(Expression tree) {
+        if (tree instanceof ListName || tree instanceof DiagramName) {
+            return true;
+        }
+        if (tree instanceof NumberName name) {
+            return name.face() != Face.PLAIN;
+        }
+        return children(tree).stream().anyMatch(Trees::cannotBeArithmetic);
+    }
+
+    /** Outside lists a fraction is a spin, so it must have the denominator 2. */
+    static void requireSpins(Expression tree) {
+        if (tree instanceof NumberName name && name.denominator() > 2) {
+            throw new UnreadableSide("a fraction that is no spin", name.span());
+        }
+        if (!(tree instanceof ListName)) {
+            children(tree).forEach(Trees::requireSpins);
+        }
+    }
+
+    /** The same tree at a wider place, when brackets around it were read. */
+    static Expression at(Expression tree, Span span) {
+        if (tree instanceof Sum sum) {
+            return new Sum(sum.terms(), span);
+        }
+        if (tree instanceof Product product) {
+            return new Product(product.factors(), span);
+        }
+        if (tree instanceof Multiple multiple) {
+            return new Multiple(multiple.count(), multiple.body(), span);
+        }
+        if (tree instanceof Power power) {
+            return new Power(power.base(), power.kind(), power.exponent(), span);
+        }
+        if (tree instanceof Part part) {
+            return new Part(part.body(), part.symmetry(), span);
+        }
+        if (tree instanceof Conjugate conjugate) {
+            return new Conjugate(conjugate.body(), span);
+        }
+        if (tree instanceof Dots) {
+            return new Dots(span);
+        }
+        Expression.Name name = (Expression.Name) tree;
+        return Decorations.with(name, name.decoration(), span);
+    }
+}
