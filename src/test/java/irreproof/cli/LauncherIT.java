@@ -68,6 +68,19 @@ class LauncherIT {
                         .toString());
     }
 
+    /** The session that also warms the class-data archive: a client opens a document, asks twice, and takes its leave. */
+    @Test
+    void servesOnStandardInputAndOutput() throws Exception {
+        Process process = start(Map.of(), LAUNCHER, "serve", "--stdio")
+                .redirectInput(Path.of("src/build/warm-up.lsp").toFile())
+                .start();
+        Run run = finish(process);
+        assertEquals(0, run.code());
+        assertEquals("", run.err());
+        assertTrue(run.out().startsWith("Content-Length: "), run.out());
+        assertTrue(run.out().contains("\"method\":\"textDocument/publishDiagnostics\""), run.out());
+    }
+
     @Test
     void wrongUsageExitsWith2() throws Exception {
         Run run = run(Map.of(), LAUNCHER, "check", "missing.tex");
