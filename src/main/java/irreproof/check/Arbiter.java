@@ -229,10 +229,8 @@ final class Arbiter {
 
     /** Two sides joined by equality whose dimensions differ, whether numbers are dimensions or spins. */
     private static Optional<Ruling.Dimensions> dimensionsDiffer(Statement statement) {
-        Optional<Ruling.Dimensions> found = Optional.empty();
         for (Chain.Link link : Chain.links(statement)) {
-            boolean equation = link.kind() == irreproof.check.judge.Comparison.Kind.EQUAL && !link.projecting();
-            if (!equation) {
+            if (!link.isEquation()) {
                 continue;
             }
             Optional<Ruling.Dimensions> asDimensions = differ(statement, link, Numbers.DIMENSION);
@@ -241,7 +239,7 @@ final class Arbiter {
                 return asDimensions;
             }
         }
-        return found;
+        return Optional.empty();
     }
 
     private static Optional<Ruling.Dimensions> differ(Statement statement, Chain.Link link, Numbers numbers) {

@@ -30,11 +30,7 @@ final class WrongSymmetry implements StatementRule {
                         + " part of the square")
                 .toList();
         return List.of(subject.finding(
-                this,
-                parts.get(0).term().span(),
-                messages.get(0),
-                messages.subList(1, messages.size()),
-                List.of()));
+                this, parts.get(0).term().span(), messages.get(0), messages.subList(1, messages.size()), List.of()));
     }
 
     private static String word(Symmetry symmetry) {

@@ -17,12 +17,9 @@ final class PassageTokens {
     private PassageTokens() {}
 
     static List<List<Token>> streams(Passage passage) {
-        if (passage.layout() == Passage.Layout.TABLE) {
-            return List.of(stream(passage, 0, Integer.MAX_VALUE));
-        }
         boolean sideBySide = passage.rows().stream().anyMatch(PassageTokens::holdsTwoEquations);
         if (!sideBySide) {
-            return List.of(stream(passage, 0, Integer.MAX_VALUE));
+            return List.of(stream(passage.rows(), 0, Integer.MAX_VALUE));
         }
         int columns = passage.rows().stream()
                 .mapToInt(row -> row.cells().size())
@@ -30,15 +27,20 @@ final class PassageTokens {
                 .orElse(0);
         List<List<Token>> streams = new ArrayList<>();
         for (int column = 0; column < columns; column += 2) {
-            streams.add(stream(passage, column, column + 2));
+            streams.add(stream(passage.rows(), column, column + 2));
         }
         return streams;
     }
 
-    private static List<Token> stream(Passage passage, int from, int to) {
+    /** One row alone. */
+    static List<Token> stream(Row row) {
+        return stream(List.of(row), 0, Integer.MAX_VALUE);
+    }
+
+    private static List<Token> stream(List<Row> rows, int from, int to) {
         List<Token> tokens = new ArrayList<>();
-        int place = passage.span().start();
-        for (Row row : passage.rows()) {
+        int place = 0;
+        for (Row row : rows) {
             for (int i = from; i < Math.min(to, row.cells().size()); i++) {
                 Cell cell = row.cells().get(i);
                 if (i > from) {

@@ -10,6 +10,8 @@ public record Relation(Kind kind, boolean negated, Span span) {
         EQUAL,
         /** {@code \to}, {@code \rightarrow}, {@code \longrightarrow}, {@code \mapsto}, {@code \xrightarrow}. */
         ARROW,
+        /** Nothing is written: the two sides stand in cells of one row of a table. */
+        CELL,
         /** The left side contains the right: {@code \ni}, {@code \supset}, {@code \supseteq}. */
         CONTAINS,
         /** The right side contains the left: {@code \in}, {@code \subset}, {@code \subseteq}. */

@@ -2,11 +2,13 @@ package irreproof.notation;
 
 import irreproof.budget.Budget;
 import irreproof.latex.Passage;
+import irreproof.latex.Row;
 import irreproof.latex.Token;
 import irreproof.notation.parser.StatementParser;
 import irreproof.text.Span;
 import java.util.ArrayList;
 import java.util.List;
+import java.util.Optional;
 
 /**
  * Pulls the statements out of a passage: strings the rows together, takes out the noise of typesetting, cuts at commas
@@ -24,7 +26,7 @@ public final class StatementFinder {
     public static List<Statement> find(String source, Passage passage, Budget budget) {
         List<Statement> statements = new ArrayList<>();
         SideReader reader = new SideReader();
-        for (List<Token> tokens : PassageTokens.streams(passage)) {
+        for (List<Token> tokens : streams(source, passage, reader, statements, budget)) {
             List<Segment> segments = Segmenter.cut(Lowering.lower(tokens, budget));
             for (int i = 0; i < segments.size(); i++) {
                 Segment next = i + 1 < segments.size() ? segments.get(i + 1) : null;
@@ -37,6 +39,25 @@ public final class StatementFinder {
         statements.sort(
                 java.util.Comparator.comparingInt(statement -> statement.span().start()));
         return statements;
+    }
+
+    /** The tokens to look through; rows of a table that are statements as a whole are read here. */
+    private static List<List<Token>> streams(
+            String source, Passage passage, SideReader reader, List<Statement> statements, Budget budget) {
+        if (passage.layout() != Passage.Layout.TABLE) {
+            return PassageTokens.streams(passage);
+        }
+        TableRow tableRow = new TableRow(source, reader, budget);
+        List<List<Token>> streams = new ArrayList<>();
+        for (Row row : passage.rows()) {
+            Optional<Statement> whole = tableRow.read(row);
+            if (whole.isPresent()) {
+                statements.add(whole.get());
+            } else {
+                streams.add(PassageTokens.stream(row));
+            }
+        }
+        return streams;
     }
 
     private static Statement read(String source, Segment segment, Segment next, SideReader reader, Budget budget) {

@@ -42,6 +42,14 @@ final class Trees {
         return tree instanceof ListName list ? list.entries() : List.of();
     }
 
+    /** True if the tree multiplies anywhere. */
+    static boolean multiplies(Expression tree) {
+        return tree instanceof Product
+                || tree instanceof Power
+                || tree instanceof Part
+                || !(tree instanceof ListName) && children(tree).stream().anyMatch(Trees::multiplies);
+    }
+
     /** A plain whole number without anything attached. */
     static boolean isCount(Expression tree) {
         return tree instanceof NumberName name

@@ -63,7 +63,7 @@ record SeenStatement(String id, String latex, String group, String kind, String 
     }
 
     private String passage() {
-        if (latex.contains("$")) {
+        if (latex.startsWith("$")) {
             boolean cut = latex.contains("$}");
             String opened = cut ? "\\multicolumn{1}{|c|}{" + latex + "}" : latex;
             return "\\begin{tabular}{lllll}\n" + opened + " \\\\\n\\end{tabular}";

@@ -44,6 +44,7 @@ final class Written {
         String sign = switch (relation.kind()) {
             case EQUAL -> "=";
             case ARROW -> "->";
+            case CELL -> "cell";
             case CONTAINS -> ">";
             case CONTAINED -> "<";
         };

@@ -17,9 +17,14 @@ public final class Chain {
     /**
      * One comparison to make.
      *
-     * @param projecting true if an arrow lies between the two sides, which in a product may mean "contains"
+     * @param loose why the two sides may differ all the same, for what lies between them; empty for an equation
      */
-    public record Link(int side, int against, Comparison.Kind kind, boolean projecting) {}
+    public record Link(int side, int against, Comparison.Kind kind, String loose) {
+        /** True if the sides are claimed to be equal, without a doubt. */
+        public boolean isEquation() {
+            return kind == Comparison.Kind.EQUAL && loose.isEmpty();
+        }
+    }
 
     /** The comparisons a statement asks for, in the order of the sides. */
     public static List<Link> links(Statement statement) {
@@ -60,7 +65,18 @@ public final class Chain {
 
     private static boolean joins(Relation relation) {
         return !relation.negated()
-                && (relation.kind() == Relation.Kind.EQUAL || relation.kind() == Relation.Kind.ARROW);
+                && switch (relation.kind()) {
+                    case EQUAL, ARROW, CELL -> true;
+                    case CONTAINS, CONTAINED -> false;
+                };
+    }
+
+    private static String loose(Relation relation) {
+        return switch (relation.kind()) {
+            case ARROW -> "an arrow behind a product may mean a projection";
+            case CELL -> "the cells of a table's row need not be equal";
+            case EQUAL, CONTAINS, CONTAINED -> "";
+        };
     }
 
     private static int reference(List<Expression> sides, int first, int last) {
@@ -87,10 +103,13 @@ public final class Chain {
             if (i == reference) {
                 continue;
             }
-            boolean arrow = statement.relations().subList(Math.min(i, reference), Math.max(i, reference)).stream()
-                    .anyMatch(relation -> relation.kind() == Relation.Kind.ARROW);
+            String loose = statement.relations().subList(Math.min(i, reference), Math.max(i, reference)).stream()
+                    .map(Chain::loose)
+                    .filter(reason -> !reason.isEmpty())
+                    .findFirst()
+                    .orElse("");
             Comparison.Kind kind = Names.isOpen(sides.get(i)) ? Comparison.Kind.PART_OF : Comparison.Kind.EQUAL;
-            links.add(new Link(i, reference, kind, arrow));
+            links.add(new Link(i, reference, kind, loose));
         }
     }
 
@@ -98,9 +117,9 @@ public final class Chain {
         int right = left + 1;
         boolean not = relation.negated();
         return switch (relation.kind()) {
-            case CONTAINS -> new Link(right, left, not ? Comparison.Kind.NOT_PART_OF : Comparison.Kind.PART_OF, false);
-            case CONTAINED -> new Link(left, right, not ? Comparison.Kind.NOT_PART_OF : Comparison.Kind.PART_OF, false);
-            case EQUAL, ARROW -> new Link(right, left, Comparison.Kind.DIFFERENT, false);
+            case CONTAINS -> new Link(right, left, not ? Comparison.Kind.NOT_PART_OF : Comparison.Kind.PART_OF, "");
+            case CONTAINED -> new Link(left, right, not ? Comparison.Kind.NOT_PART_OF : Comparison.Kind.PART_OF, "");
+            case EQUAL, ARROW, CELL -> new Link(right, left, Comparison.Kind.DIFFERENT, "");
         };
     }
 }

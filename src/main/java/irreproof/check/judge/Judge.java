@@ -165,15 +165,15 @@ public final class Judge<I extends Comparable<? super I>> {
             values.add(evaluator.value(side));
         }
         List<Comparison<I>> comparisons = new ArrayList<>();
-        boolean projection = false;
+        String loose = "";
         for (Chain.Link link : links) {
             Comparison<I> comparison = compare(link, values);
             comparisons.add(comparison);
-            projection |= link.projecting() && !comparison.holds();
+            loose = comparison.holds() || link.loose().isEmpty() ? loose : link.loose();
         }
         boolean holds = comparisons.stream().allMatch(Comparison::holds);
-        if (!holds && projection) {
-            throw new Undecidable("an arrow behind a product may mean a projection");
+        if (!loose.isEmpty()) {
+            return Judgement.undecided(loose);
         }
         List<WrongPart> wrongParts = holds ? Parts.wrong(statement, lexicon, reading, evaluator, values) : List.of();
         Outcome outcome = holds && wrongParts.isEmpty() ? Outcome.HOLDS : Outcome.FAILS;

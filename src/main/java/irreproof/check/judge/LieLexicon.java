@@ -101,8 +101,8 @@ public final class LieLexicon implements Lexicon<DominantWeight> {
                     throw new Undecidable("irreps of product groups and charges are not judged yet");
                 }
                 if (senses.isEmpty()) {
-                    throw Undecidable.otherGroup("a list of " + list.entries().size() + " entries does not name an irrep of "
-                            + group.display());
+                    throw Undecidable.otherGroup("a list of " + list.entries().size()
+                            + " entries does not name an irrep of " + group.display());
                 }
             }
         }

@@ -60,7 +60,8 @@ final class Pruning<I extends Comparable<? super I>> {
     private static List<Name> listedTerms(Expression side) {
         List<Name> terms = new ArrayList<>();
         for (Expression term : Names.terms(side)) {
-            boolean counted = term instanceof Multiple multiple && multiple.count().signum() > 0;
+            boolean counted =
+                    term instanceof Multiple multiple && multiple.count().signum() > 0;
             Expression body = counted ? ((Multiple) term).body() : term;
             if (body instanceof Name name) {
                 terms.add(name);

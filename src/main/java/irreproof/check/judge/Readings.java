@@ -82,8 +82,8 @@ final class Readings<I extends Comparable<? super I>> {
         List<NameKey> keys = List.copyOf(candidates.keySet());
         List<Reading<I>> result = new ArrayList<>();
         int worst = candidates.values().stream()
-                .mapToInt(list ->
-                        list.stream().mapToInt(Candidate::unusual).max().orElse(0))
+                .mapToInt(
+                        list -> list.stream().mapToInt(Candidate::unusual).max().orElse(0))
                 .sum();
         truncated = false;
         for (int unusual = 0; unusual <= worst && !truncated; unusual++) {
@@ -103,9 +103,7 @@ final class Readings<I extends Comparable<? super I>> {
         if (from == keys.size()) {
             if (left == 0 && result.size() < most) {
                 int unusual = interpretation.unusual()
-                        + chosen.values().stream()
-                                .mapToInt(Candidate::unusual)
-                                .sum();
+                        + chosen.values().stream().mapToInt(Candidate::unusual).sum();
                 result.add(new Reading<>(interpretation, chosen, unusual));
             } else if (left == 0) {
                 truncated = true;
