@@ -8,12 +8,4 @@ Content-Length: 306
 
 {"jsonrpc":"2.0","id":2,"method":"textDocument/hover","params":{"textDocument":{"uri":"file:///nowhere/warm-up.tex"},"position":{"line":6,"character":2}}}Content-Length: 228
 
-{"jsonrpc":"2.0","id":3,"method":"textDocument/codeAction","params":{"textDocument":{"uri":"file:///nowhere/warm-up.tex"},"range":{"start":{"line":6,"character":30},"end":{"line":6,"character":31}},"context":{"diagnostics":[]}}}Content-Length: 419
-
-{"jsonrpc":"2.0","method":"textDocument/didChange","params":{"textDocument":{"uri":"file:///nowhere/warm-up.tex","version":2},"contentChanges":[{"text":"\\documentclass{article}\n\\newcommand{\\rep}[1]{\\mathbf{#1}}\n\\begin{document}\nIn SU(3),\n\\begin{align}\n\\rep{3}\\otimes\\bar{\\rep{3}} &= \\rep{1}\\oplus\\rep{8}, \\\\\n\\rep{3}\\otimes\\rep{3} &= \\rep{6}\\oplus\\rep{3},\n\\end{align}\n\\end{document}\n"}]}}Content-Length: 155
-
-{"jsonrpc":"2.0","id":4,"method":"textDocument/hover","params":{"textDocument":{"uri":"file:///nowhere/warm-up.tex"},"position":{"line":6,"character":30}}}Content-Length: 44
-
-{"jsonrpc":"2.0","id":5,"method":"shutdown"}Content-Length: 33
-
-{"jsonrpc":"2.0","method":"exit"}
+{"jsonrpc":"2.0","id":3,"method":"textDocument/codeAction","params":{"textDocument":{"uri":"file:///nowhere/warm-up.tex"},"range":{"start":{"line":6,"character":30},"end":{"line":6,"character":31}},"context":{"diagnostics":[]}}}

@@ -68,7 +68,7 @@ class LauncherIT {
                         .toString());
     }
 
-    /** The session that also warms the class-data archive: a client opens a document, asks twice, and takes its leave. */
+    /** The session that also warms the class-data archive: a client opens a document, asks twice, and closes its end. */
     @Test
     void servesOnStandardInputAndOutput() throws Exception {
         Process process = start(Map.of(), LAUNCHER, "serve", "--stdio")
