@@ -37,7 +37,8 @@ public final class Checker {
      * @throws IllegalArgumentException if the default group cannot be read
      */
     public static FileReport check(SourceText source, CheckOptions options, Budget budget) {
-        return new Checker(Reader.read(source, options.sources(), budget), options, budget).run();
+        List<SourceText> preambles = options.sources().preambles(source.path());
+        return new Checker(Reader.read(source, preambles, options.sources(), budget), options, budget).run();
     }
 
     /** Whether a group typed by the user can be read; the reason if not. */
