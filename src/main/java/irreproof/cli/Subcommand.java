@@ -6,7 +6,7 @@ import picocli.CommandLine.ParseResult;
 
 /**
  * One of the program's commands. Options are declared in code, not by annotations, which picocli would have to read by
- * reflection at every start: a third of the whole time of a short check.
+ * reflection at every start.
  */
 interface Subcommand {
     String name();

@@ -85,8 +85,13 @@ final class Arguments {
 
     /** Eats a star if one stands here. */
     boolean star() {
-        taken.clear();
         return mark('*');
+    }
+
+    /** Eats this character if it stands here, behind blanks. */
+    boolean mark(char character) {
+        taken.clear();
+        return isMarked(character);
     }
 
     /** The control sequence, bare or in braces, that a definition is about; null if there is none. */
@@ -110,6 +115,23 @@ final class Arguments {
         return names ? found : null;
     }
 
+    /** Behind {@code \csname}: the control word that the tokens up to {@code \endcsname} spell, or null. */
+    Token constructed(Token word) {
+        StringBuilder name = new StringBuilder();
+        Span span = word.span();
+        Token token = expander.raw();
+        while (token != null && token.kind() != TokenKind.CONTROL_WORD && token.kind() != TokenKind.PARAGRAPH_BREAK) {
+            name.append(token.text());
+            span = span.cover(token.span());
+            token = expander.raw();
+        }
+        if (token == null || !token.isWord("endcsname")) {
+            expander.push(token);
+            return null;
+        }
+        return new Token(TokenKind.CONTROL_WORD, name.toString(), span.cover(token.span()));
+    }
+
     /** The next mandatory argument as the characters of a name, or null. */
     String name() {
         List<Token> argument = mandatory();
@@ -129,7 +151,7 @@ final class Arguments {
             return plain();
         }
         if (parameter instanceof Parameter.Mark mark) {
-            return List.of(marker(mark(mark.character()) ? TRUE : FALSE));
+            return List.of(marker(isMarked(mark.character()) ? TRUE : FALSE));
         }
         if (parameter instanceof Parameter.Bracketed bracketed) {
             List<Token> argument = bracketed(bracketed.open(), bracketed.close());
@@ -261,7 +283,7 @@ final class Arguments {
         return one.kind() == other.kind() && one.text().equals(other.text());
     }
 
-    private boolean mark(char character) {
+    private boolean isMarked(char character) {
         int before = taken.size();
         Token token = takeBehindBlanks();
         if (token != null && token.isCharacter(character)) {

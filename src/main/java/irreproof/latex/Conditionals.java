@@ -1,10 +1,11 @@
 package irreproof.latex;
 
+import java.util.List;
 import java.util.Set;
 
 /**
  * Resolves TeX's conditionals as far as they can be known here: {@code \iftrue}, {@code \iffalse}, {@code \newif}
- * switches, {@code \ifmmode}. Of any other both branches are read in prose; in mathematics it spoils the passage.
+ * switches, {@code \ifmmode}, {@code \ifx}, {@code \ifnum} of plain numbers. Of any other both branches are read in prose; in mathematics it spoils the passage.
  */
 final class Conditionals {
     private static final Set<String> PRIMITIVES = Set.of(
@@ -89,6 +90,9 @@ final class Conditionals {
             case "iftrue" -> Boolean.TRUE;
             case "iffalse" -> Boolean.FALSE;
             case "ifmmode" -> expander.isMathMode();
+            case "ifx" -> sameMeaning(expander.raw(), expander.raw());
+            case "ifdefined" -> isDefined(expander.raw());
+            case "ifnum" -> compare();
             default -> macros.switchState(name.substring(2));
         };
         if (value == null) {
@@ -98,6 +102,67 @@ final class Conditionals {
         } else if (!value) {
             skip(true);
         }
+    }
+
+    private boolean sameMeaning(Token one, Token other) {
+        if (one == null || other == null) {
+            return false;
+        }
+        Macro first = meaning(one);
+        Macro second = meaning(other);
+        if (first != null || second != null) {
+            return first != null && first.equals(second);
+        }
+        return one.kind() == other.kind() && one.text().equals(other.text());
+    }
+
+    /** The macro a control sequence stands for; {@code \empty} counts as one without tokens. */
+    private Macro meaning(Token token) {
+        if (token.kind() != TokenKind.CONTROL_WORD && token.kind() != TokenKind.CONTROL_SYMBOL) {
+            return null;
+        }
+        Macro macro = macros.find(token.text());
+        boolean empty = macro == null && (token.isWord("empty") || token.isWord("@empty"));
+        return empty ? Macro.of(List.of(), List.of()) : macro;
+    }
+
+    /** Only of the user's own commands do we know it. */
+    private Boolean isDefined(Token token) {
+        return token != null && macros.find(token.text()) != null ? Boolean.TRUE : null;
+    }
+
+    /** {@code \ifnum} of two numbers written out, or null. */
+    private Boolean compare() {
+        Integer left = number();
+        Token relation = expander.raw();
+        if (left == null || relation == null) {
+            expander.push(relation);
+            return null;
+        }
+        Integer right = number();
+        if (right == null) {
+            return null;
+        }
+        int order = Integer.compare(left, right);
+        return switch (relation.text()) {
+            case "<" -> order < 0;
+            case "=" -> order == 0;
+            case ">" -> order > 0;
+            default -> null;
+        };
+    }
+
+    private Integer number() {
+        Integer value = null;
+        Token token = expander.raw();
+        while (token != null && token.kind() == TokenKind.DIGIT && (value == null || value < 10_000_000)) {
+            value = (value == null ? 0 : 10 * value) + token.text().charAt(0) - '0';
+            token = expander.raw();
+        }
+        if (token == null || token.kind() != TokenKind.SPACE) {
+            expander.push(token);
+        }
+        return value;
     }
 
     /** Skips to the matching {@code \fi}, or behind the matching {@code \else}. */

@@ -36,6 +36,9 @@ final class Definitions {
             case "gdef", "xdef":
                 primitive(true);
                 return true;
+            case "@namedef":
+                named();
+                return true;
             case "let":
                 let();
                 return true;
@@ -101,6 +104,12 @@ final class Definitions {
         while (name != null && name.kind() == TokenKind.SPACE) {
             name = expander.raw();
         }
+        if (name != null && name.isWord("expandafter")) {
+            name = expander.raw();
+        }
+        if (name != null && name.isWord("csname")) {
+            name = arguments.constructed(name);
+        }
         if (name == null || name.kind() != TokenKind.CONTROL_WORD && name.kind() != TokenKind.CONTROL_SYMBOL) {
             expander.push(name);
             return;
@@ -135,6 +144,14 @@ final class Definitions {
             macros.defineGlobally(name.text(), macro);
         } else {
             macros.define(name.text(), macro);
+        }
+    }
+
+    private void named() {
+        String name = arguments.name();
+        List<Token> body = name == null ? null : arguments.mandatory();
+        if (body != null) {
+            macros.define(name, Macro.of(List.of(), body));
         }
     }
 

@@ -113,7 +113,9 @@ final class DocumentReader {
     private void accept(Token token) {
         switch (token.kind()) {
             case INLINE_SHIFT, DISPLAY_SHIFT -> {
-                if (!preamble && !token.text().equals("\\)") && !token.text().equals("\\]")) {
+                if (isVisible(token)
+                        && !token.text().equals("\\)")
+                        && !token.text().equals("\\]")) {
                     passage(token, token.text());
                 }
             }
@@ -142,13 +144,18 @@ final class DocumentReader {
     }
 
     private void show(Token token) {
-        if (preamble && token.span().start() >= headingEnd) {
+        if (!isVisible(token)) {
             return;
         }
         if (token.kind() != TokenKind.SPACE && token.kind() != TokenKind.PARAGRAPH_BREAK) {
             touch(token.span());
         }
         prose.accept(token);
+    }
+
+    /** Of a preamble, only the title is. */
+    private boolean isVisible(Token token) {
+        return !preamble || token.span().start() < headingEnd;
     }
 
     private void touch(Span span) {
@@ -178,8 +185,16 @@ final class DocumentReader {
                 endParagraph();
                 show(new Token(TokenKind.PARAGRAPH_BREAK, "\n\n", token.span()));
             }
-            case "bgroup", "begingroup" -> shared.macros.openGroup();
-            case "egroup", "endgroup" -> shared.macros.closeGroup();
+            case "bgroup", "begingroup" -> {
+                if (!preamble) {
+                    shared.macros.openGroup();
+                }
+            }
+            case "egroup", "endgroup" -> {
+                if (!preamble) {
+                    shared.macros.closeGroup();
+                }
+            }
             case "footnote", "caption", "footnotetext" -> {
                 prose.blank(token.span());
                 show(token);
@@ -244,14 +259,14 @@ final class DocumentReader {
         String name = expander.arguments().name();
         if ("document".equals(name)) {
             ended = true;
-        } else {
+        } else if (!preamble) {
             shared.macros.closeGroup();
         }
     }
 
     private void ensuredMathematics(Token token) {
         List<Token> argument = expander.arguments().mandatory();
-        if (argument == null || preamble) {
+        if (argument == null || !isVisible(token)) {
             return;
         }
         List<Token> formula = new ArrayList<>(argument);

@@ -35,14 +35,11 @@ final class Environments {
         MacroTable.Environment environment = macros.environment(name);
         boolean begins = word.text().equals("begin");
         if (environment == null) {
-            Macro command = begins ? macros.find(name) : macros.find("end" + name);
-            if (command == null
-                    || command.prefix().size() + command.parameters().size() > 0
-                    || !command.expandable()) {
-                expander.push(taken);
-                return false;
-            }
-            environment = new MacroTable.Environment(command, command);
+            environment = byCommands(name);
+        }
+        if (environment == null) {
+            expander.push(taken);
+            return false;
         }
         Token whole = word;
         for (Token token : taken) {
@@ -54,6 +51,14 @@ final class Environments {
         }
         end(place, name, environment);
         return true;
+    }
+
+    /** {@code \begin{name}} is {@code \name} and {@code \end{name}} is {@code \endname} where the user defined both. */
+    private MacroTable.Environment byCommands(String name) {
+        Macro begin = macros.find(name);
+        Macro end = begin == null ? null : macros.find("end" + name);
+        boolean usable = end != null && begin.expandable() && end.expandable();
+        return usable ? new MacroTable.Environment(begin, end) : null;
     }
 
     private boolean begin(Token place, String name, MacroTable.Environment environment, List<Token> taken) {

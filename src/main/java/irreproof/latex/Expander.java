@@ -76,6 +76,7 @@ final class Expander {
     private final Arguments arguments = new Arguments(this);
     private final Definitions definitions;
     private final Conditionals conditionals;
+    private final Choices choices;
     private final Environments environments;
     private final Inclusions inclusions;
     private boolean mathMode;
@@ -90,6 +91,7 @@ final class Expander {
         this.inclusions = inclusions;
         definitions = new Definitions(this);
         conditionals = new Conditionals(this);
+        choices = new Choices(this);
         environments = new Environments(this);
     }
 
@@ -174,6 +176,13 @@ final class Expander {
                 return true;
             case "ensuremath":
                 return mathMode;
+            case "csname":
+                push(arguments.constructed(word));
+                return true;
+            case "@nameuse":
+                String name = arguments.name();
+                push(name == null ? null : new Token(TokenKind.CONTROL_WORD, name, word.span()));
+                return true;
             case "makeatletter":
                 lexer.atIsLetter(true);
                 return true;
@@ -183,6 +192,7 @@ final class Expander {
             default:
                 return definitions.carryOut(word)
                         || conditionals.carryOut(word)
+                        || choices.carryOut(word)
                         || inclusions.carryOut(word, this)
                         || environments.named(word);
         }

@@ -1,5 +1,6 @@
 package irreproof.latex;
 
+import irreproof.text.Span;
 import java.util.List;
 
 /**
@@ -11,10 +12,12 @@ import java.util.List;
  *     keeps the meaning it had at that time
  */
 public record Macro(List<Token> prefix, List<Parameter> parameters, List<Token> body, boolean expandable) {
+    private static final Span NOWHERE = new Span(0, 0);
+
     public Macro {
         prefix = List.copyOf(prefix);
         parameters = List.copyOf(parameters);
-        body = List.copyOf(body);
+        body = body.stream().map(token -> token.at(NOWHERE)).toList();
     }
 
     static Macro of(List<Parameter> parameters, List<Token> body) {

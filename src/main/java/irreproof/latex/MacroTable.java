@@ -53,7 +53,9 @@ public final class MacroTable {
     }
 
     void defineGlobally(String name, Macro macro) {
-        undos.removeIf(undo -> undo.name().equals(name));
+        if (!undos.isEmpty()) {
+            undos.removeIf(undo -> undo.name().equals(name));
+        }
         macros.put(name, macro);
     }
 

@@ -33,7 +33,17 @@ final class PassageReader {
             "raisebox",
             "textcolor");
     private static final Set<String> NEVER_INSIDE = Set.of(
-            "part", "chapter", "section", "subsection", "subsubsection", "paragraph", "bibliography", "maketitle");
+            "part",
+            "chapter",
+            "section",
+            "subsection",
+            "subsubsection",
+            "paragraph",
+            "bibliography",
+            "maketitle",
+            "item",
+            "bibitem",
+            "caption");
 
     private final Expander expander;
     private final Flattener prose;
@@ -45,6 +55,7 @@ final class PassageReader {
     private final BitSet textGroups = new BitSet();
 
     private int depth;
+    private int groupsBefore;
     private boolean textNext;
     private boolean shifted;
     private Span span;
@@ -61,7 +72,8 @@ final class PassageReader {
     /** Reads to the passage's end; null if there is nothing in it or its expansion had to be given up. */
     Passage read() {
         expander.takeFailure();
-        int groupsBefore = expander.macros().openGroups();
+        groupsBefore = expander.macros().openGroups();
+        expander.macros().openGroup();
         mathMode(!table);
         if (!isShift()) {
             environments.push(environment);
@@ -131,9 +143,18 @@ final class PassageReader {
                 expander.macros().openGroup();
                 break;
             case END_GROUP:
-                if (depth > 0) {
-                    depth--;
-                    expander.macros().closeGroup();
+                if (depth == 0) {
+                    return stray(token);
+                }
+                depth--;
+                expander.macros().closeGroup();
+                break;
+            case ALIGN:
+                closeFormulaOfCell(token);
+                break;
+            case CONTROL_SYMBOL:
+                if (token.text().equals("\\")) {
+                    closeFormulaOfCell(token);
                 }
                 break;
             case SPACE:
@@ -146,6 +167,25 @@ final class PassageReader {
         }
         add(token);
         return true;
+    }
+
+    /** A closing brace without its opening one ends the passage if it closes a group around it, and is dropped if not. */
+    private boolean stray(Token token) {
+        if (groupsBefore == 0) {
+            return true;
+        }
+        expander.push(token);
+        return false;
+    }
+
+    /** A formula in a table's cell ends with the cell at the latest. */
+    private void closeFormulaOfCell(Token token) {
+        if (shifted && depth == 0 && environments.size() == 1) {
+            inlineShift(new Token(
+                    TokenKind.INLINE_SHIFT,
+                    "$",
+                    new Span(token.span().start(), token.span().start())));
+        }
     }
 
     private boolean inText() {
@@ -207,13 +247,29 @@ final class PassageReader {
         if (name.equals("end")) {
             return end(token);
         }
-        if (NEVER_INSIDE.contains(name)) {
+        if (name.equals("ensuremath")) {
+            ensuredMathematics(token);
+            return true;
+        }
+        if (NEVER_INSIDE.contains(name) && !inText() && !table) {
             expander.push(token);
             return false;
         }
         textNext = TEXT_COMMANDS.contains(name);
         add(token);
         return true;
+    }
+
+    /** Met only in a table, outside its formulas. */
+    private void ensuredMathematics(Token token) {
+        List<Token> argument = expander.arguments().mandatory();
+        if (argument != null) {
+            List<Token> formula = new ArrayList<>();
+            formula.add(new Token(TokenKind.INLINE_SHIFT, "$", token.span()));
+            formula.addAll(argument);
+            formula.add(new Token(TokenKind.INLINE_SHIFT, "$", token.span()));
+            expander.push(formula);
+        }
     }
 
     private boolean begin(Token token) {
