@@ -29,7 +29,7 @@ final class ChamberReflection {
     /**
      * The same for a weight shifted by rho, where weights on a wall do not count.
      *
-     * @return the determinant, or 0 if the weight lies on a reflecting hyperplane (then its labels are left anyhow)
+     * @return the determinant, or 0 if the weight lies on a reflecting hyperplane (its labels are then of no use)
      */
     static int toStrictlyDominant(RootSystem system, int[] labels) {
         int sign = 1;

@@ -17,17 +17,31 @@ import java.util.Map;
 public final class KlimykProduct {
     private KlimykProduct() {}
 
+    /** Where the character of the smaller factor comes from: {@link DominantCharacter}, or a memory of its results. */
+    @FunctionalInterface
+    interface CharacterSource {
+        Map<DominantWeight, Long> character(DominantWeight highest, Budget budget);
+    }
+
     /** The product of two irreps. */
     public static Decomposition<DominantWeight> product(
             SimpleAlgebra algebra, DominantWeight left, DominantWeight right, Budget budget) {
-        boolean leftIsSmaller =
-                WeylDimension.dimension(algebra, left).compareTo(WeylDimension.dimension(algebra, right)) < 0;
-        DominantWeight smaller = leftIsSmaller ? left : right;
-        DominantWeight larger = leftIsSmaller ? right : left;
+        return product(
+                algebra, left, right, (highest, allowed) -> DominantCharacter.of(algebra, highest, allowed), budget);
+    }
+
+    static Decomposition<DominantWeight> product(
+            SimpleAlgebra algebra,
+            DominantWeight left,
+            DominantWeight right,
+            CharacterSource characters,
+            Budget budget) {
         RootSystem system = RootSystem.of(algebra);
-        budget.require(ProductBound.leastIrreps(algebra, left, right), "the product " + left + " x " + right);
-        Map<DominantWeight, Long> character = DominantCharacter.of(algebra, smaller, budget);
-        return scaled(system, character, 1, Decomposition.of(larger), budget);
+        budget.require(ProductBound.leastIrreps(algebra, left, right), "a product of irreps of " + algebra);
+        BigInteger leftDimension = WeylDimension.dimension(algebra, left);
+        boolean leftIsSmaller = leftDimension.compareTo(WeylDimension.dimension(algebra, right)) < 0;
+        Map<DominantWeight, Long> character = characters.character(leftIsSmaller ? left : right, budget);
+        return scaled(system, character, 1, Decomposition.of(leftIsSmaller ? right : left), budget);
     }
 
     /**
@@ -46,7 +60,9 @@ public final class KlimykProduct {
             return sum;
         }
         int terms = sum.multiplicities().size();
-        budget.require(weights(system, character).multiply(BigInteger.valueOf(terms)), "a product");
+        budget.require(
+                weights(system, character).multiply(BigInteger.valueOf(terms)),
+                "a product of irreps of " + system.algebra());
         Map<DominantWeight, Long> result = new HashMap<>();
         int[] shifted = new int[system.rank()];
         character.forEach((dominant, multiplicity) -> WeylOrbit.forEach(system, dominant, budget, weight -> {

@@ -18,18 +18,37 @@ import java.util.Optional;
  */
 public record LieRing(SimpleAlgebra algebra) implements RepresentationRing<DominantWeight> {
     private static final long KEPT_TERMS = 200_000;
-    private static final BoundedCache<Product, Decomposition<DominantWeight>> PRODUCTS =
+    private static final BoundedCache<Question, Decomposition<DominantWeight>> ANSWERS =
             new BoundedCache<>(KEPT_TERMS, sum -> sum.multiplicities().size());
-    private static final BoundedCache<Power, Decomposition<DominantWeight>> POWERS =
-            new BoundedCache<>(KEPT_TERMS, sum -> sum.multiplicities().size());
-    private static final BoundedCache<Irrep, Map<DominantWeight, Long>> CHARACTERS =
+    private static final BoundedCache<Question, Map<DominantWeight, Long>> CHARACTERS =
             new BoundedCache<>(KEPT_TERMS, Map::size);
 
-    private record Product(SimpleAlgebra algebra, DominantWeight left, DominantWeight right) {}
+    /** What was asked. Its equality is written out for the reason given at {@link SimpleAlgebra#hashCode}. */
+    private record Question(
+            Kind kind, SimpleAlgebra algebra, DominantWeight first, DominantWeight second, int exponent) {
+        private enum Kind {
+            CHARACTER,
+            PRODUCT,
+            SYMMETRIC,
+            EXTERIOR
+        }
 
-    private record Power(SimpleAlgebra algebra, DominantWeight weight, boolean exterior, int exponent) {}
+        @Override
+        public boolean equals(Object other) {
+            return other instanceof Question that
+                    && kind == that.kind
+                    && exponent == that.exponent
+                    && algebra.equals(that.algebra)
+                    && first.equals(that.first)
+                    && second.equals(that.second);
+        }
 
-    private record Irrep(SimpleAlgebra algebra, DominantWeight weight) {}
+        @Override
+        public int hashCode() {
+            int irreps = 31 * first.hashCode() + second.hashCode();
+            return (31 * irreps + algebra.hashCode()) * 31 + 4 * exponent + kind.ordinal();
+        }
+    }
 
     @Override
     public DominantWeight trivial() {
@@ -48,8 +67,8 @@ public record LieRing(SimpleAlgebra algebra) implements RepresentationRing<Domin
 
     /** Dominant weights with multiplicities, the highest weight first. */
     public Map<DominantWeight, Long> character(DominantWeight irrep, Budget budget) {
-        return CHARACTERS.get(
-                new Irrep(algebra, irrep), budget, allowed -> DominantCharacter.of(algebra, irrep, allowed));
+        Question question = new Question(Question.Kind.CHARACTER, algebra, irrep, irrep, 1);
+        return CHARACTERS.get(question, budget, allowed -> DominantCharacter.of(algebra, irrep, allowed));
     }
 
     @Override
@@ -59,9 +78,10 @@ public record LieRing(SimpleAlgebra algebra) implements RepresentationRing<Domin
         boolean inOrder = left.compareTo(right) <= 0;
         DominantWeight first = inOrder ? left : right;
         DominantWeight second = inOrder ? right : left;
-        return PRODUCTS.get(new Product(algebra, first, second), budget, allowed -> switch (algebra.series()) {
+        Question question = new Question(Question.Kind.PRODUCT, algebra, first, second, 1);
+        return ANSWERS.get(question, budget, allowed -> switch (algebra.series()) {
             case A -> LittlewoodRichardson.product(first, second, allowed);
-            case B, C, D, E, F, G -> KlimykProduct.product(algebra, first, second, allowed);
+            case B, C, D, E, F, G -> KlimykProduct.product(algebra, first, second, this::character, allowed);
         });
     }
 
@@ -88,8 +108,9 @@ public record LieRing(SimpleAlgebra algebra) implements RepresentationRing<Domin
         if (exponent < 0) {
             throw new IllegalArgumentException("negative exponent " + exponent);
         }
-        return POWERS.get(
-                new Power(algebra, irrep, exterior, exponent),
+        Question.Kind kind = exterior ? Question.Kind.EXTERIOR : Question.Kind.SYMMETRIC;
+        return ANSWERS.get(
+                new Question(kind, algebra, irrep, irrep, exponent),
                 budget,
                 allowed -> AdamsPowers.power(algebra, character(irrep, allowed), exterior, exponent, allowed));
     }

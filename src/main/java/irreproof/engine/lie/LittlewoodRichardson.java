@@ -1,6 +1,7 @@
 package irreproof.engine.lie;
 
 import irreproof.budget.Budget;
+import irreproof.budget.BudgetExceeded;
 import irreproof.engine.Decomposition;
 import java.util.Arrays;
 import java.util.HashMap;
@@ -13,10 +14,13 @@ import java.util.Map;
  * same shape with the same last strip are counted together.
  *
  * <p>Cost: one step per row looked at while placing strips; independent of the dimensions, hence fit for large N. Of the
- * two factors and their conjugates the one with the fewest boxes is added. A multiplicity beyond 64 bits throws
+ * two factors and their conjugates the one with the fewest boxes is added. At most 1000 rows in all. A multiplicity beyond 64 bits throws
  * {@link ArithmeticException}.
  */
 public final class LittlewoodRichardson {
+    /** The placing of strips recurses row by row. */
+    private static final int MOST_ROWS = 1000;
+
     private final int[] added;
     private final int rows;
     private final Budget budget;
@@ -32,7 +36,7 @@ public final class LittlewoodRichardson {
     public static Decomposition<DominantWeight> product(DominantWeight left, DominantWeight right, Budget budget) {
         SimpleAlgebra algebra = new SimpleAlgebra(Series.A, left.rank());
         algebra.requireWeight(right);
-        budget.require(ProductBound.leastIrreps(algebra, left, right), "the product " + left + " x " + right);
+        budget.require(ProductBound.leastIrreps(algebra, left, right), "a product of irreps of " + algebra);
         DominantWeight leftDual = Conjugation.conjugate(algebra, left);
         DominantWeight rightDual = Conjugation.conjugate(algebra, right);
         long boxes = Math.min(boxes(left), boxes(right));
@@ -64,6 +68,10 @@ public final class LittlewoodRichardson {
             return Map.of();
         }
         int used = Math.min(rows, larger.length() + smaller.length());
+        if (used > MOST_ROWS) {
+            throw new BudgetExceeded(
+                    BudgetExceeded.Cause.TOO_LARGE, "a product of diagrams with " + used + " rows is too large");
+        }
         int[] added = smaller.rows().stream().mapToInt(Integer::intValue).toArray();
         return new LittlewoodRichardson(added, used, budget).run(larger);
     }

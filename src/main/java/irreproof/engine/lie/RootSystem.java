@@ -1,13 +1,14 @@
 package irreproof.engine.lie;
 
 import irreproof.budget.BudgetExceeded;
+import java.math.BigInteger;
 import java.util.ArrayList;
+import java.util.Arrays;
 import java.util.LinkedHashMap;
 import java.util.LinkedHashSet;
 import java.util.List;
 import java.util.Map;
 import java.util.Set;
-import java.util.stream.IntStream;
 
 /**
  * The root system of a simple Lie algebra: Cartan matrix, invariant form, positive roots. Weights are given by Dynkin
@@ -33,6 +34,7 @@ public final class RootSystem {
     private final long formDenominator;
     private final int[][] neighbours;
     private List<Root> positiveRoots;
+    private BigInteger weylGroupOrder;
 
     private RootSystem(SimpleAlgebra algebra) {
         this.algebra = algebra;
@@ -46,13 +48,23 @@ public final class RootSystem {
                 form[i][j] *= simpleRootLength(j);
             }
         }
-        this.neighbours = IntStream.range(0, rank).mapToObj(this::neighbours).toArray(int[][]::new);
+        this.neighbours = neighbours(cartan);
     }
 
-    private int[] neighbours(int node) {
-        return IntStream.range(0, algebra.rank())
-                .filter(other -> other != node && cartan[node][other] != 0)
-                .toArray();
+    /** The Dynkin diagram is a chain but for the branches of D and E, which reach two nodes back. */
+    private static int[][] neighbours(int[][] cartan) {
+        int[][] neighbours = new int[cartan.length][];
+        for (int node = 0; node < cartan.length; node++) {
+            int[] found = new int[3];
+            int count = 0;
+            for (int other = Math.max(0, node - 2); other < Math.min(cartan.length, node + 3); other++) {
+                if (other != node && cartan[node][other] != 0) {
+                    found[count++] = other;
+                }
+            }
+            neighbours[node] = Arrays.copyOf(found, count);
+        }
+        return neighbours;
     }
 
     /** @throws BudgetExceeded (too large) beyond rank 128 */
@@ -169,6 +181,14 @@ public final class RootSystem {
             positiveRoots = List.copyOf(findPositiveRoots());
         }
         return positiveRoots;
+    }
+
+    /** The number of elements of the Weyl group. */
+    public synchronized BigInteger weylGroupOrder() {
+        if (weylGroupOrder == null) {
+            weylGroupOrder = WeylGroup.order(this, node -> true);
+        }
+        return weylGroupOrder;
     }
 
     private List<Root> findPositiveRoots() {

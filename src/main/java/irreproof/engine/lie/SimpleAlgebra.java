@@ -48,8 +48,21 @@ public record SimpleAlgebra(Series series, int rank) {
         }
     }
 
+    // equals and hashCode written out: a record's generated ones go through method handles, whose first use costs more
+    // than the rest of a short run's algebra
+
+    @Override
+    public boolean equals(Object other) {
+        return other instanceof SimpleAlgebra that && series == that.series && rank == that.rank;
+    }
+
+    @Override
+    public int hashCode() {
+        return 31 * rank + series.ordinal();
+    }
+
     @Override
     public String toString() {
-        return series.name() + rank;
+        return series.name().concat(Integer.toString(rank));
     }
 }

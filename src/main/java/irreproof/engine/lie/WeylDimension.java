@@ -1,20 +1,30 @@
 package irreproof.engine.lie;
 
+import irreproof.budget.BudgetExceeded;
 import java.math.BigInteger;
 import java.util.Map;
 import java.util.concurrent.ConcurrentHashMap;
 
 /**
  * Weyl's dimension formula, the product over the positive coroots of (weight + rho, coroot) / (rho, coroot). Classical
- * algebras: in orthogonal coordinates, quadratic in the rank and without a table, for any rank. Exceptional algebras:
- * over the list of positive coroots. Factors that cancel (the coroot does not see the weight) are not multiplied.
+ * algebras: in orthogonal coordinates and without a table; coordinates that do not differ are passed over in blocks, so
+ * small diagrams cost their rows times the rank. Exceptional algebras: over the list of positive coroots.
  */
 public final class WeylDimension {
     private static final Map<SimpleAlgebra, int[][]> EXCEPTIONAL_COROOTS = new ConcurrentHashMap<>();
 
+    /** Beyond so many coordinates equal factors are struck out before multiplying. */
+    private static final int MANY = 64;
+
+    private static final long MOST_PAIRS = 4_000_000;
+
     private WeylDimension() {}
 
-    /** The dimension of the irrep with this highest weight. */
+    /**
+     * The dimension of the irrep with this highest weight.
+     *
+     * @throws BudgetExceeded (too large) if more than four million coroots see the weight: never up to rank 2000
+     */
     public static BigInteger dimension(SimpleAlgebra algebra, DominantWeight weight) {
         algebra.requireWeight(weight);
         return switch (algebra.series()) {
@@ -24,39 +34,48 @@ public final class WeylDimension {
     }
 
     private static BigInteger classical(SimpleAlgebra algebra, DominantWeight weight) {
-        long[] shifted = OrthogonalCoordinates.of(algebra, weight, 1);
-        long[] rho = OrthogonalCoordinates.of(algebra, zero(algebra.rank()), 1);
-        Quotient quotient = new Quotient();
+        long[] plain = OrthogonalCoordinates.of(algebra, weight, 0);
+        long[] rho = OrthogonalCoordinates.of(algebra, DominantWeight.of(new int[algebra.rank()]), 1);
+        FactorQuotient quotient = new FactorQuotient(plain.length > MANY);
         boolean sums = algebra.series() != Series.A;
-        for (int i = 0; i < shifted.length; i++) {
-            for (int j = i + 1; j < shifted.length; j++) {
-                quotient.factor(shifted[i] - shifted[j], rho[i] - rho[j]);
-                if (sums) {
-                    quotient.factor(shifted[i] + shifted[j], rho[i] + rho[j]);
-                }
+        boolean single = algebra.series() == Series.B || algebra.series() == Series.C;
+        long pairs = 0;
+        int blockEnd = 0;
+        for (int i = 0; i < plain.length && plain[i] != 0; i++) {
+            while (blockEnd < plain.length && plain[blockEnd] == plain[i]) {
+                blockEnd++;
             }
-            if (algebra.series() == Series.B || algebra.series() == Series.C) {
-                quotient.factor(shifted[i], rho[i]);
+            pairs += plain.length - (sums ? i : blockEnd);
+            if (pairs > MOST_PAIRS) {
+                throw new BudgetExceeded(
+                        BudgetExceeded.Cause.TOO_LARGE, "the dimension of an irrep of " + algebra + " is too large");
+            }
+            for (int j = blockEnd; j < plain.length; j++) {
+                quotient.factor(plain[i] - plain[j] + rho[i] - rho[j], rho[i] - rho[j]);
+            }
+            for (int j = sums ? i + 1 : plain.length; j < plain.length; j++) {
+                quotient.factor(plain[i] + plain[j] + rho[i] + rho[j], rho[i] + rho[j]);
+            }
+            if (single) {
+                quotient.factor(plain[i] + rho[i], rho[i]);
             }
         }
         return quotient.value();
-    }
-
-    private static DominantWeight zero(int rank) {
-        return DominantWeight.of(new int[rank]);
     }
 
     private static BigInteger exceptional(SimpleAlgebra algebra, DominantWeight weight) {
         // at most five keys: E6, E7, E8, F4, G2
         int[][] coroots = EXCEPTIONAL_COROOTS.computeIfAbsent(algebra, WeylDimension::positiveCoroots);
         int rank = algebra.rank();
-        Quotient quotient = new Quotient();
+        FactorQuotient quotient = new FactorQuotient(false);
         for (int[] coroot : coroots) {
             long paired = 0;
             for (int i = 0; i < rank; i++) {
                 paired += (long) coroot[i] * weight.label(i);
             }
-            quotient.factor(paired + coroot[rank], coroot[rank]);
+            if (paired != 0) {
+                quotient.factor(paired + coroot[rank], coroot[rank]);
+            }
         }
         return quotient.value();
     }
@@ -76,41 +95,5 @@ public final class WeylDimension {
                     return coroot;
                 })
                 .toArray(int[][]::new);
-    }
-
-    /** A product of fractions, held in machine words while it fits. */
-    private static final class Quotient {
-        private final Product numerator = new Product();
-        private final Product denominator = new Product();
-
-        void factor(long above, long below) {
-            if (above != below) {
-                numerator.multiply(above);
-                denominator.multiply(below);
-            }
-        }
-
-        BigInteger value() {
-            return numerator.value().divide(denominator.value());
-        }
-    }
-
-    private static final class Product {
-        private long small = 1;
-        private BigInteger large = BigInteger.ONE;
-
-        void multiply(long factor) {
-            long low = small * factor;
-            if (Math.multiplyHigh(small, factor) != low >> 63) {
-                large = large.multiply(BigInteger.valueOf(small));
-                small = factor;
-            } else {
-                small = low;
-            }
-        }
-
-        BigInteger value() {
-            return large.multiply(BigInteger.valueOf(small));
-        }
     }
 }

@@ -3,7 +3,6 @@ package irreproof.engine.lie;
 import java.math.BigInteger;
 import java.util.ArrayDeque;
 import java.util.ArrayList;
-import java.util.Arrays;
 import java.util.BitSet;
 import java.util.Deque;
 import java.util.List;
@@ -48,43 +47,58 @@ final class WeylGroup {
 
     private static BigInteger componentOrder(RootSystem system, List<Integer> component) {
         int rank = component.size();
-        int strongest = component.stream()
-                .mapToInt(node -> bond(system, component, node))
-                .max()
-                .orElse(1);
-        List<Integer> ends = component.stream()
-                .filter(node -> inside(system, component, node).length <= 1)
-                .toList();
+        int strongest = 1;
+        boolean strongestAtAnEnd = false;
+        int shortArms = 0;
+        int ends = 0;
+        for (int node : component) {
+            int bond = bond(system, component, node);
+            strongest = Math.max(strongest, bond);
+            if (degree(system, component, node) <= 1) {
+                ends++;
+                strongestAtAnEnd |= bond == 2;
+                shortArms += isShortArm(system, component, node) ? 1 : 0;
+            }
+        }
         if (strongest == 3) {
             return BigInteger.valueOf(12);
         }
         if (strongest == 2) {
-            boolean atAnEnd = ends.stream().anyMatch(node -> bond(system, component, node) == 2);
-            return atAnEnd ? factorial(rank).shiftLeft(rank) : BigInteger.valueOf(1152);
+            return strongestAtAnEnd ? factorial(rank).shiftLeft(rank) : BigInteger.valueOf(1152);
         }
-        if (ends.size() < 3) {
+        if (ends < 3) {
             return factorial(rank + 1);
         }
-        // D_n has two or three arms of length one, E_n has one
-        long shortArms = ends.stream()
-                .map(node -> inside(system, component, node)[0])
-                .filter(next -> inside(system, component, next).length == 3)
-                .count();
         return shortArms >= 2 ? factorial(rank).shiftLeft(rank - 1) : exceptional(rank);
     }
 
-    private static int[] inside(RootSystem system, List<Integer> component, int node) {
-        return Arrays.stream(system.neighboursOf(node))
-                .filter(component::contains)
-                .toArray();
+    private static int degree(RootSystem system, List<Integer> component, int node) {
+        int degree = 0;
+        for (int other : system.neighboursOf(node)) {
+            degree += component.contains(other) ? 1 : 0;
+        }
+        return degree;
     }
 
     /** The strongest bond at a node within the component: 1, 2 or 3 lines. */
     private static int bond(RootSystem system, List<Integer> component, int node) {
-        return Arrays.stream(inside(system, component, node))
-                .map(other -> system.cartan(node, other) * system.cartan(other, node))
-                .max()
-                .orElse(1);
+        int bond = 1;
+        for (int other : system.neighboursOf(node)) {
+            if (component.contains(other)) {
+                bond = Math.max(bond, system.cartan(node, other) * system.cartan(other, node));
+            }
+        }
+        return bond;
+    }
+
+    /** Whether an end is joined to the branching node: so are two or three ends of D_n, and one of E_n. */
+    private static boolean isShortArm(RootSystem system, List<Integer> component, int end) {
+        for (int other : system.neighboursOf(end)) {
+            if (component.contains(other) && degree(system, component, other) == 3) {
+                return true;
+            }
+        }
+        return false;
     }
 
     private static BigInteger exceptional(int rank) {

@@ -17,7 +17,7 @@ public final class WeylOrbit {
     /** The number of weights, without enumerating them: the group's order over the stabiliser's. */
     public static BigInteger size(RootSystem system, DominantWeight weight) {
         system.algebra().requireWeight(weight);
-        return WeylGroup.order(system, node -> true).divide(WeylGroup.order(system, node -> weight.label(node) == 0));
+        return system.weylGroupOrder().divide(WeylGroup.order(system, node -> weight.label(node) == 0));
     }
 
     /**

@@ -12,6 +12,7 @@ import java.util.HashSet;
 import java.util.Map;
 import java.util.Set;
 import org.junit.jupiter.api.Test;
+import org.junit.jupiter.api.Timeout;
 
 class DominantCharacterTest {
     /** The weights fill the dimension, and their squared lengths the index (Dynkin 1952): rank l = sum of (w, w). */
@@ -101,6 +102,7 @@ class DominantCharacterTest {
     }
 
     @Test
+    @Timeout(value = 20, threadMode = Timeout.ThreadMode.SEPARATE_THREAD)
     void hopelessWorkIsRefusedBeforeItStarts() {
         SimpleAlgebra algebra = new SimpleAlgebra(Series.E, 8);
         DominantWeight weight = DominantWeight.of(90, 90, 90, 90, 90, 90, 90, 90);

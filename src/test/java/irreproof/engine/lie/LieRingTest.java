@@ -12,6 +12,7 @@ import java.math.BigInteger;
 import java.util.Arrays;
 import java.util.Optional;
 import org.junit.jupiter.api.Test;
+import org.junit.jupiter.api.Timeout;
 
 class LieRingTest {
     private static final Budget UNLIMITED = Budget.unlimited();
@@ -136,6 +137,7 @@ class LieRingTest {
     }
 
     @Test
+    @Timeout(value = 20, threadMode = Timeout.ThreadMode.SEPARATE_THREAD)
     void hopelessProductsAreRefusedBeforeTheyStart() {
         for (SimpleAlgebra algebra : Algebras.upToRank(8)) {
             int[] labels = new int[algebra.rank()];
@@ -147,5 +149,22 @@ class LieRingTest {
                     assertThrows(BudgetExceeded.class, () -> ring.product(weight, weight, budget), algebra::toString);
             assertEquals(BudgetExceeded.Cause.TOO_LARGE, refusal.reason());
         }
+    }
+
+    @Test
+    @Timeout(value = 20, threadMode = Timeout.ThreadMode.SEPARATE_THREAD)
+    void hugeRanksAreRefusedWithoutOverflowingTheStack() {
+        LieRing ring = new LieRing(new SimpleAlgebra(Series.A, 50_000));
+        int[] labels = new int[50_000];
+        labels[0] = 1;
+        DominantWeight fundamental = DominantWeight.of(labels);
+        assertEquals(
+                2,
+                ring.product(fundamental, fundamental, UNLIMITED)
+                        .multiplicities()
+                        .size());
+        labels[49_999] = 1;
+        DominantWeight adjoint = DominantWeight.of(labels);
+        assertThrows(BudgetExceeded.class, () -> ring.product(adjoint, adjoint, UNLIMITED));
     }
 }

@@ -10,6 +10,7 @@ import irreproof.engine.Decomposition;
 import java.math.BigInteger;
 import java.util.List;
 import org.junit.jupiter.api.Test;
+import org.junit.jupiter.api.Timeout;
 
 class PowersTest {
     private static final Budget UNLIMITED = Budget.unlimited();
@@ -100,6 +101,7 @@ class PowersTest {
     }
 
     @Test
+    @Timeout(value = 20, threadMode = Timeout.ThreadMode.SEPARATE_THREAD)
     void hopelessPowersAreRefused() {
         LieRing ring = new LieRing(new SimpleAlgebra(Series.A, 2));
         DominantWeight weight = DominantWeight.of(1, 0);

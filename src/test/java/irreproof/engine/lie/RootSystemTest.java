@@ -6,6 +6,7 @@ import static org.junit.jupiter.api.Assertions.assertThrows;
 import irreproof.budget.BudgetExceeded;
 import java.util.List;
 import org.junit.jupiter.api.Test;
+import org.junit.jupiter.api.Timeout;
 
 class RootSystemTest {
     @Test
@@ -54,6 +55,7 @@ class RootSystemTest {
     }
 
     @Test
+    @Timeout(value = 20, threadMode = Timeout.ThreadMode.SEPARATE_THREAD)
     void ranksBeyondTheLimitAreRefused() {
         SimpleAlgebra huge = new SimpleAlgebra(Series.D, 100_000);
         assertThrows(BudgetExceeded.class, () -> RootSystem.of(huge));

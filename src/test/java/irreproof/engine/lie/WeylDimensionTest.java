@@ -2,8 +2,11 @@ package irreproof.engine.lie;
 
 import static org.junit.jupiter.api.Assertions.assertEquals;
 import static org.junit.jupiter.api.Assertions.assertThrows;
+import static org.junit.jupiter.api.Assertions.assertTimeoutPreemptively;
 
+import irreproof.budget.BudgetExceeded;
 import java.math.BigInteger;
+import java.time.Duration;
 import java.util.Map;
 import java.util.TreeSet;
 import org.junit.jupiter.api.Test;
@@ -105,6 +108,29 @@ class WeylDimensionTest {
                     row::toString);
             multiple++;
         }
+    }
+
+    /** SO(2n)'s spinors have 2^(n-1) dimensions, SO(2n+1)'s 2^n (Fulton and Harris, 20); binomials for SU(n). */
+    @Test
+    void largeRanksAreNoBombs() {
+        Duration limit = Duration.ofSeconds(20);
+        assertTimeoutPreemptively(limit, () -> {
+            SimpleAlgebra so2000 = new SimpleAlgebra(Series.D, 1000);
+            assertEquals(BigInteger.TWO.pow(999), WeylDimension.dimension(so2000, node(1000, 999)));
+            SimpleAlgebra so2001 = new SimpleAlgebra(Series.B, 1000);
+            assertEquals(BigInteger.TWO.pow(1000), WeylDimension.dimension(so2001, node(1000, 1000)));
+            SimpleAlgebra su100000 = new SimpleAlgebra(Series.A, 99_999);
+            assertEquals(new BigInteger("4999950000"), WeylDimension.dimension(su100000, node(99_999, 2)));
+            assertEquals(new BigInteger("100000"), WeylDimension.dimension(su100000, node(99_999, 99_999)));
+            DominantWeight middle = node(99_999, 50_000);
+            assertThrows(BudgetExceeded.class, () -> WeylDimension.dimension(su100000, middle));
+        });
+    }
+
+    private static DominantWeight node(int rank, int node) {
+        int[] labels = new int[rank];
+        labels[node - 1] = 1;
+        return DominantWeight.of(labels);
     }
 
     @Test
