@@ -32,6 +32,8 @@ class LieRingTest {
                 Decomposition<DominantWeight> product = ring.product(left, right, UNLIMITED);
                 String message = algebra + ": " + left + " x " + right;
                 assertTrue(product.isActual(), message);
+                BigInteger terms = BigInteger.valueOf(product.multiplicities().size());
+                assertTrue(ProductBound.leastIrreps(algebra, left, right).compareTo(terms) <= 0, message);
                 assertEquals(product, ring.product(right, left, UNLIMITED), message);
                 assertEquals(ring.dimension(left).multiply(ring.dimension(right)), ring.dimension(product), message);
                 assertEquals(indexOfProduct(ring, left, right), index(algebra, product), message);
