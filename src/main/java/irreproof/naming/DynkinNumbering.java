@@ -51,4 +51,9 @@ public final class DynkinNumbering {
         }
         return List.copyOf(candidates);
     }
+
+    /** The labels of an irrep as Slansky orders them. */
+    public static List<Integer> inSlanskysOrder(LieGroup group, DominantWeight irrep) {
+        return IntStream.of(slansky(group.algebra())).map(irrep::label).boxed().toList();
+    }
 }

@@ -52,14 +52,21 @@ public final class TextReport {
         text.append('\n');
     }
 
-    /** The title, then what the edited stretch reads afterwards, on lines of its own, ready to paste. */
+    /** What the edited stretch should read, ready to paste; the fix's title if that is nothing. */
     private void fix(Fix fix, SourceText source) {
-        String result = fixed(fix, source.content());
-        text.append(INDENT).append(fix.title()).append(result.isBlank() ? "\n" : ":\n");
-        result.lines()
+        List<String> lines = fixed(fix, source.content())
+                .lines()
                 .filter(line -> !line.isBlank())
-                .forEach(line ->
-                        text.append(INDENT).append(INDENT).append(line.strip()).append('\n'));
+                .map(String::strip)
+                .toList();
+        if (lines.isEmpty()) {
+            text.append(INDENT).append(fix.title()).append('\n');
+        } else if (lines.size() == 1) {
+            text.append(INDENT).append("should read: ").append(lines.get(0)).append('\n');
+        } else {
+            text.append(INDENT).append("should read:\n");
+            lines.forEach(line -> text.append(INDENT).append(INDENT).append(line).append('\n'));
+        }
     }
 
     private static String fixed(Fix fix, String content) {

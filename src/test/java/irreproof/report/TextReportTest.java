@@ -109,10 +109,10 @@ class TextReportTest {
     void showsWhatTheEditedStretchWillRead() {
         Fix both = new Fix(
                 "bar both", false, List.of(new TextEdit(new Span(0, 1), "c"), new TextEdit(new Span(2, 3), "d")));
-        assertFix("    bar both:\n        c+d\n", "a+b", both);
+        assertFix("    should read: c+d\n", "a+b", both);
         assertFix("    take it out\n", "a+b", new Fix("take it out", true, List.of(new TextEdit(new Span(0, 3), ""))));
         assertFix(
-                "    put it on two lines:\n        c\n        d\n",
+                "    should read:\n        c\n        d\n",
                 "a+b",
                 new Fix("put it on two lines", true, List.of(new TextEdit(new Span(0, 3), "  c\n  d"))));
         assertFix("    think again\n", "a+b", new Fix("think again", false, List.of()));
