@@ -78,7 +78,13 @@ final class Cards {
     }
 
     private void add(Expression expression, Reading<DominantWeight> reading) {
+        boolean unknown = Names.of(expression).stream()
+                .anyMatch(subject.ruling().judgement().unknownNames()::contains);
         if (expression instanceof Dots) {
+            return;
+        }
+        if (unknown) {
+            Names.children(expression).forEach(child -> add(child, reading));
             return;
         }
         try {

@@ -11,9 +11,10 @@ import java.util.List;
 
 /** A judged statement as the rules see it, with the words to speak of it. */
 record Case(Statement statement, Ruling ruling, Wording wording) {
-    /** The comparisons that fail, of a statement that fails. */
+    /** The comparisons that fail, of a statement that fails and whose names all have a meaning. */
     List<Comparison<DominantWeight>> failures() {
-        if (ruling.verdict() != Verdict.FAILS || ruling.judgement() == null) {
+        boolean failed = ruling.verdict() == Verdict.FAILS && ruling.judgement() != null;
+        if (!failed || !ruling.judgement().unknownNames().isEmpty()) {
             return List.of();
         }
         return ruling.judgement().comparisons().stream()

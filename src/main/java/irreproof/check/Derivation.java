@@ -81,7 +81,7 @@ public final class Derivation {
             case HOLDS -> {
                 Ruling ruling = new Ruling(Verdict.HOLDS, "", null, SettingSource.NONE, judgement, lexicon, null, null);
                 Wording wording = new Wording(new SourceText("", latex), bare, List.of(statement), ruling, budget);
-                String right = wording.corrected(judgement.values().get(0), 0);
+                String right = wording.usualSum(judgement.values().get(0));
                 yield new Result(true, bare.latex().strip() + " = " + right);
             }
         };

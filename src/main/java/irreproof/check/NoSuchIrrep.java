@@ -27,6 +27,9 @@ final class NoSuchIrrep implements StatementRule {
         }
         String list = names.stream().map(subject.wording()::written).distinct().collect(Collectors.joining(", "));
         String message = subject.ruling().settingName() + " has no irrep " + list;
-        return List.of(subject.finding(this, names.get(0).span(), message, List.of(), List.of()));
+        List<Fix> fixes = subject.ruling().judgement().comparisons().stream()
+                .flatMap(comparison -> subject.replaceSide(comparison).stream())
+                .toList();
+        return List.of(subject.finding(this, names.get(0).span(), message, List.of(), fixes));
     }
 }

@@ -40,8 +40,7 @@ final class Vocabulary {
     private final long boxes;
     private final Budget budget;
 
-    private Vocabulary(
-            LieLexicon lexicon, Reading<DominantWeight> reading, Name sample, long boxes, Budget budget) {
+    private Vocabulary(LieLexicon lexicon, Reading<DominantWeight> reading, Name sample, long boxes, Budget budget) {
         this.lexicon = lexicon;
         this.reading = reading;
         this.sample = sample;
@@ -55,16 +54,13 @@ final class Vocabulary {
     }
 
     static Vocabulary ofSide(
-            Expression side,
-            Statement statement,
-            LieLexicon lexicon,
-            Reading<DominantWeight> reading,
-            Budget budget) {
+            Expression side, Statement statement, LieLexicon lexicon, Reading<DominantWeight> reading, Budget budget) {
         List<Name> names = Names.of(side);
         Name sample = names.isEmpty() ? Names.of(statement.sides().get(0)).get(0) : names.get(0);
         long boxes = names.stream()
                 .filter(DiagramName.class::isInstance)
-                .mapToLong(name -> ((DiagramName) name).rows().stream().mapToLong(Integer::longValue).sum())
+                .mapToLong(name -> ((DiagramName) name)
+                        .rows().stream().mapToLong(Integer::longValue).sum())
                 .max()
                 .orElse(0);
         return new Vocabulary(lexicon, reading, sample, boxes, budget);
@@ -128,12 +124,14 @@ final class Vocabulary {
     private WrittenName dimension(DominantWeight irrep) {
         Decomposition<DominantWeight> plain = Decomposition.of(irrep);
         Decomposition<DominantWeight> barred = Decomposition.of(conjugate(irrep));
-        for (Map.Entry<NameKey, Decomposition<DominantWeight>> meaning : meanings().entrySet()) {
+        for (Map.Entry<NameKey, Decomposition<DominantWeight>> meaning :
+                meanings().entrySet()) {
             if (meaning.getValue().equals(plain)) {
                 return written(meaning.getKey(), irrep, 0);
             }
         }
-        for (Map.Entry<NameKey, Decomposition<DominantWeight>> meaning : meanings().entrySet()) {
+        for (Map.Entry<NameKey, Decomposition<DominantWeight>> meaning :
+                meanings().entrySet()) {
             if (meaning.getValue().equals(barred)) {
                 return written(meaning.getKey(), irrep, 1);
             }
@@ -159,8 +157,7 @@ final class Vocabulary {
     private WrittenName ofTables(DominantWeight irrep) {
         try {
             IrrepLabel label = lexicon.dimensionNames().labelOf(irrep, budget.withSteps(Wording.STEPS));
-            return new WrittenTerm.Dimension(
-                    label.dimension(), label.barred() ? 1 : 0, label.primes(), label.suffix());
+            return new WrittenTerm.Dimension(label.dimension(), label.barred() ? 1 : 0, label.primes(), label.suffix());
         } catch (BudgetExceeded exceeded) {
             if (exceeded.reason() == BudgetExceeded.Cause.CANCELLED) {
                 throw exceeded;

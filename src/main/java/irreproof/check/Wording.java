@@ -69,7 +69,7 @@ final class Wording {
         return Writer.name(vocabulary(statement.sides().get(side)).name(irrep), style.get());
     }
 
-    /** A sum, its irreps named as the side names them, largest first; empty for zero. */
+    /** A sum, its irreps named as the side names its own, largest first; empty for zero. */
     String sum(Decomposition<DominantWeight> sum, int side) {
         return written(sum, vocabulary(statement.sides().get(side)), largestFirst(sum));
     }
@@ -112,8 +112,7 @@ final class Wording {
         return source.lines().position(span.start()).line() + 1;
     }
 
-    private String written(
-            Decomposition<DominantWeight> sum, Vocabulary vocabulary, List<DominantWeight> order) {
+    private String written(Decomposition<DominantWeight> sum, Vocabulary vocabulary, List<DominantWeight> order) {
         if (sum.isZero()) {
             return "";
         }
@@ -171,7 +170,11 @@ final class Wording {
         return true;
     }
 
+    /** What an expression lists; nothing if it holds a name without a meaning. */
     private Decomposition<DominantWeight> value(Expression expression) {
+        if (Names.of(expression).stream().anyMatch(ruling.judgement().unknownNames()::contains)) {
+            return Decomposition.zero();
+        }
         try {
             return Judge.valueOf(
                     expression, ruling.lexicon(), ruling.judgement().reading(), budget.withSteps(STEPS));

@@ -103,7 +103,8 @@ final class CheckCommand implements Subcommand {
 
     private static FileReport check(SourceText source, String group, FileCache included) {
         ProjectSources sources = new ProjectSources(source, OpenDocuments.none(), included);
-        return Checker.check(source, new CheckOptions(group, sources, CheckOptions.DEFAULT_STEPS, false), Budget.unlimited());
+        return Checker.check(
+                source, new CheckOptions(group, sources, CheckOptions.DEFAULT_STEPS, false), Budget.unlimited());
     }
 
     private static boolean hasError(FileReport report) {

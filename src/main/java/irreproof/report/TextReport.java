@@ -65,7 +65,8 @@ public final class TextReport {
             text.append(INDENT).append("should read: ").append(lines.get(0)).append('\n');
         } else {
             text.append(INDENT).append("should read:\n");
-            lines.forEach(line -> text.append(INDENT).append(INDENT).append(line).append('\n'));
+            lines.forEach(
+                    line -> text.append(INDENT).append(INDENT).append(line).append('\n'));
         }
     }
 

@@ -59,9 +59,7 @@ class LayersTest {
         assertNone(dependency -> {
             String from = ProgramClasses.layer(dependency.getOriginClass());
             String to = ProgramClasses.layer(dependency.getTargetClass());
-            return !to.isEmpty()
-                    && !to.equals(from)
-                    && !MAY_USE.get(from).contains(to);
+            return !to.isEmpty() && !to.equals(from) && !MAY_USE.get(from).contains(to);
         });
     }
 

@@ -4,8 +4,10 @@ import static irreproof.check.Fixture.checks;
 import static irreproof.check.Fixture.only;
 import static irreproof.check.Fixture.report;
 import static org.junit.jupiter.api.Assertions.assertEquals;
+import static org.junit.jupiter.api.Assertions.assertTrue;
 
 import java.util.List;
+import java.util.Map;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.params.ParameterizedTest;
 import org.junit.jupiter.params.provider.CsvSource;
@@ -142,5 +144,20 @@ class CheckerTest {
                 % irreproof: name 126 = (0,0,0,2,0)
                 In $SO(10)$, $\\mathbf{16}\\otimes\\mathbf{16}=\\mathbf{10}\\oplus\\mathbf{120}\\oplus\\overline{\\mathbf{126}}$.
                 """);
+    }
+
+    @Test
+    void theFixMendsTheStatement() {
+        String source =
+                "In $SU(3)$, $\\rep{8}\\otimes\\rep{8}=\\rep{27}\\oplus\\rep{10}\\oplus\\bar{\\rep{10}}\\oplus\\rep{8}\\oplus\\rep{1}$.\n";
+        Map<String, String> files = Map.of("m", "\\newcommand{\\rep}[1]{\\mathbf{#1}}");
+        FileReport before = report("\\input{m}" + source, "", files);
+        Finding finding = before.allFindings().get(0);
+        String mended = irreproof.text.TextEdit.apply(
+                before.source().content(), finding.fixes().get(0).edits());
+        FileReport after = report(mended, "", files);
+        assertEquals(List.of(), after.allFindings(), mended);
+        assertEquals(Verdict.HOLDS, after.statements().get(0).verdict());
+        assertTrue(mended.contains("\\rep{8}\\oplus\\rep{8}") || mended.contains("2\\,\\rep{8}"), mended);
     }
 }

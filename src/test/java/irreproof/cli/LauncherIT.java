@@ -4,6 +4,7 @@ import static org.junit.jupiter.api.Assertions.assertEquals;
 import static org.junit.jupiter.api.Assertions.assertTrue;
 
 import com.google.gson.JsonParser;
+import irreproof.Golden;
 import irreproof.Tools;
 import java.io.IOException;
 import java.nio.charset.StandardCharsets;
@@ -49,6 +50,29 @@ class LauncherIT {
         Path second = Files.createSymbolicLink(there.resolve("second link"), Path.of("first"));
         assertEquals(run(Map.of(), LAUNCHER, "--version"), run(Map.of(), first, "--version"));
         assertEquals(run(Map.of(), LAUNCHER, "--version"), run(Map.of(), second, "--version"));
+    }
+
+    /** README's first command: the demo's planted mistakes and nothing else, word for word. */
+    @Test
+    void reportsTheDemo() throws Exception {
+        Run run = run(
+                Map.of(),
+                LAUNCHER,
+                "check",
+                Path.of("src/demo").toAbsolutePath().toString());
+        assertEquals("", run.err());
+        Golden.assertMatches("demo/report.txt", run.out().replace(Path.of("").toAbsolutePath() + "/", ""));
+        assertEquals(1, run.code());
+    }
+
+    @Test
+    void derivesAndExplainsRules() throws Exception {
+        assertEquals(
+                new Run(0, "3\\otimes\\bar 3 = 8\\oplus1\n", ""),
+                run(Map.of(), LAUNCHER, "derive", "3\\otimes\\bar 3", "--group", "SU(3)"));
+        assertEquals(2, run(Map.of(), LAUNCHER, "derive", "3\\otimes 3").code());
+        Run page = run(Map.of(), LAUNCHER, "rules", "dimension-mismatch");
+        assertTrue(page.out().startsWith("# dimension-mismatch\n"), page.out());
     }
 
     @Test

@@ -15,15 +15,13 @@ class TextReportTest {
             paper/main.tex:1:14: warning: this directive cannot be read [unreadable-directive]
                 % irreproof: grup SU(3)
                              ^~~~~~~~~~
-                write:
-                    group
+                should read: group
 
             paper/main.tex:2:28: error: 6 and 3 are not what 3 times 3 is: missing \\bar 3, surplus 3 [wrong-summand]
                 In SU(3), é $3 \\otimes 3 = 6 \\oplus 3$,
                                            ^~~~~~~~~~
                 N-ality: the left side has 2, the summand 3 has 1
-                replace the right side by:
-                    6 \\oplus \\bar 3
+                should read: 6 \\oplus \\bar 3
 
             2 files, 3 statements: 1 holds, 1 fails, 1 undecided (no group named: 1)
             1 error, 1 warning

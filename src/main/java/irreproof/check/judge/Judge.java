@@ -71,7 +71,7 @@ public final class Judge<I extends Comparable<? super I>> {
         for (Interpretation interpretation : lexicon.interpretations(names)) {
             Readings<I> readings = Readings.of(lexicon, interpretation, names, budget);
             if (!readings.unknown().isEmpty()) {
-                failures.add(unknown(readings.unknown()));
+                failures.add(unknown(readings));
                 continue;
             }
             Readings<I> possible = new Pruning<>(statement, lexicon, budget).prune(readings, links);
@@ -129,9 +129,8 @@ public final class Judge<I extends Comparable<? super I>> {
             case HOLDS, FAILS ->
                 failure.comparisons().stream().mapToLong(Judge::distance).sum()
                         + failure.wrongParts().size()
-                        + (failure.reading() == null
-                                ? UNKNOWN * failure.unknownNames().size()
-                                : failure.reading().unusual());
+                        + UNKNOWN * failure.unknownNames().size()
+                        + failure.reading().unusual();
             case NOT_ITS_GROUP -> Long.MAX_VALUE;
         };
     }
@@ -146,13 +145,27 @@ public final class Judge<I extends Comparable<? super I>> {
                 .sum();
     }
 
-    private Judgement<I> unknown(List<Name> unknown) {
-        Expression deciding = statement.sides().get(Chain.reference(statement));
+    /** The other names decide, and what the sides with the unknown names must be is known all the same. */
+    private Judgement<I> unknown(Readings<I> readings) {
+        List<Name> unknown = readings.unknown();
+        int reference = Chain.reference(statement);
+        Expression deciding = statement.sides().get(reference);
         List<Name> ofDeciding = Names.of(deciding);
         if (!Names.multiplies(deciding) || unknown.stream().anyMatch(ofDeciding::contains)) {
             return Judgement.notItsGroup("", unknown);
         }
-        return new Judgement<>(Outcome.FAILS, "", null, List.of(), List.of(), List.of(), unknown, List.of());
+        List<Name> known =
+                names.stream().filter(name -> !unknown.contains(name)).toList();
+        Reading<I> reading = readings.of(known).all(1).get(0);
+        Decomposition<I> expected = new Evaluator<>(lexicon, reading, budget).value(deciding);
+        List<Comparison<I>> comparisons = links.stream()
+                .filter(link -> link.isEquation() && link.against() == reference)
+                .filter(link ->
+                        Names.of(statement.sides().get(link.side())).stream().anyMatch(unknown::contains))
+                .map(link -> new Comparison<I>(
+                        link.side(), link.against(), link.kind(), false, expected, Decomposition.zero()))
+                .toList();
+        return new Judgement<>(Outcome.FAILS, "", reading, comparisons, List.of(), List.of(), unknown, List.of());
     }
 
     private Judgement<I> evaluate(Reading<I> reading) {

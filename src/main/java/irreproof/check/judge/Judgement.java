@@ -11,10 +11,11 @@ import java.util.List;
  * @param outcome what is claimed
  * @param reason why it is undecided, or what in the form of the names does not fit the group; or empty
  * @param reading the reading that makes it hold; for a failure the most usual reading; null if names have no meaning
- * @param comparisons under that reading, in the order of the sides
+ * @param comparisons under that reading, in the order of the sides; if names are unknown, those of the sides that hold
+ *     them, with nothing found
  * @param values what each side lists under that reading; empty if there is none
  * @param satisfying every reading that makes it hold, most usual first (bounded)
- * @param unknownNames names that no irrep of the group can have
+ * @param unknownNames names that no irrep of the group can have; the reading then covers the others
  * @param wrongParts terms marked as symmetric or antisymmetric that are not
  */
 public record Judgement<I extends Comparable<? super I>>(
