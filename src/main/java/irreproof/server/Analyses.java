@@ -104,7 +104,7 @@ final class Analyses {
         }
         try {
             CheckOptions options =
-                    new CheckOptions(session.get().settings().group(), run.sources(), CheckOptions.DEFAULT_STEPS);
+                    new CheckOptions(session.get().settings().group(), run.sources(), CheckOptions.DEFAULT_STEPS, true);
             FileReport report = analysis.check(run.document().source(), options, run.budget());
             List<Diagnostic> diagnostics =
                     new Diagnostics(run.document(), report, session.get().client()).list();

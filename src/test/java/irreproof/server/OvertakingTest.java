@@ -166,7 +166,7 @@ class OvertakingTest {
             assertFalse(waiting.isDone());
             editor.change(2, new TextDocumentContentChangeEvent(QUICK));
             assertNull(Editor.await(waiting), "what it was asked about is gone");
-            assertEquals("2'\n\nDimension: 2", editor.hover(0, 6));
+            assertEquals("2'\n\ndimension: 2", editor.hover(0, 6));
         }
     }
 
@@ -211,7 +211,7 @@ class OvertakingTest {
             editor.open("clean");
             editor.nextDiagnostics();
             editor.change(2, new TextDocumentContentChangeEvent(QUICK));
-            assertEquals("2'\n\nDimension: 2", editor.hover(0, 6));
+            assertEquals("2'\n\ndimension: 2", editor.hover(0, 6));
             assertEquals(2, editor.nextDiagnostics().getVersion());
             editor.leave();
         }
