@@ -338,9 +338,7 @@ final class Lowering {
             return signs.negation(i, to);
         }
         if (meaning instanceof Commands.Delimiter) {
-            return noise.isForeignDelimiter(i, to)
-                    ? add(StatementParser.UNREADABLE, i, tape.skipSpaces(i + 1, to) + 1)
-                    : noise.delimiter(i, to);
+            return delimiter(i, to);
         }
         if (meaning instanceof Commands.PhysicsBrackets) {
             TokenTape.Argument argument = tape.argument(i + 1, to);
@@ -355,6 +353,15 @@ final class Lowering {
             return environment(environment.begin(), i, to);
         }
         return add(StatementParser.UNREADABLE, i, i + 1);
+    }
+
+    /** A sized bracket is one with its command; the invisible delimiter is nothing. */
+    private int delimiter(int i, int to) {
+        int next = noise.delimiter(i, to);
+        if (next < 0) {
+            return -next;
+        }
+        return add(noise.delimiterType(next), i, next + 1);
     }
 
     private int faced(int i, int to, Face face, int depth) {

@@ -1,6 +1,8 @@
 package irreproof.notation;
 
+import irreproof.latex.Token;
 import irreproof.latex.TokenKind;
+import irreproof.notation.parser.StatementParser;
 import java.util.regex.Pattern;
 
 /** How far the typesetting reaches that says nothing about representations. Every method returns where reading goes on. */
@@ -74,18 +76,36 @@ final class Noise {
         return next;
     }
 
-    /** The invisible delimiter behind {@code \left} and its kin; any other delimiter is read as a token of its own. */
+    /**
+     * The place of the bracket behind {@code \left} and its kin, which must be read with it; a negative number, if
+     * reading goes on at its opposite because none follows.
+     */
     int delimiter(int i, int to) {
         int next = tape.skipSpaces(i + 1, to);
-        return tape.isCharacter(next, to, '.') ? next + 1 : i + 1;
+        if (tape.isCharacter(next, to, '.')) {
+            return -(next + 1);
+        }
+        boolean delimiter = next < to
+                && (tape.at(next).kind() == TokenKind.OTHER
+                        || tape.at(next).kind() == TokenKind.CONTROL_WORD
+                        || tape.at(next).kind() == TokenKind.CONTROL_SYMBOL);
+        return delimiter ? next : -(i + 1);
     }
 
-    /** True if the delimiter behind {@code \left} and its kin is none of our brackets, as in a ket. */
-    boolean isForeignDelimiter(int i, int to) {
-        int next = tape.skipSpaces(i + 1, to);
-        return tape.isCharacter(next, to, '<')
-                || tape.isCharacter(next, to, '>')
-                || tape.isCharacter(next, to, '/')
-                || next < to && tape.at(next).isWord("mid");
+    /** The type of the lexeme for a sized delimiter; anything but our brackets is unreadable, as in a ket. */
+    int delimiterType(int index) {
+        Token token = tape.at(index);
+        int type = StatementParser.UNREADABLE;
+        if (token.kind() == TokenKind.CONTROL_WORD) {
+            type = Commands.of(token.text()) instanceof Commands.Single single ? single.type() : type;
+        } else if (token.kind() == TokenKind.CONTROL_SYMBOL) {
+            type = token.text().equals("{")
+                    ? StatementParser.CURLY_OPEN
+                    : token.text().equals("}") ? StatementParser.CURLY_CLOSE : type;
+        } else {
+            type = Characters.type(token.text().charAt(0));
+        }
+        Lexeme delimiter = Lexeme.bare(type, token.span());
+        return Adjacency.opens(delimiter) || Adjacency.closesBracket(delimiter) ? type : StatementParser.UNREADABLE;
     }
 }

@@ -19,6 +19,9 @@ final class Scripts {
     private static final Pattern PRIMES_AND_STARS = Pattern.compile("['*]+");
     private static final Pattern EXPONENT = Pattern.compile("([⊗∧⊙∨]?)\\(?(\\d{1,6})\\)?");
     private static final Pattern POWER_OF_UNKNOWN_SIZE = Pattern.compile(".*[⊗∧⊙∨].*");
+    /** {@code 2^{l-1}} is a number, no index. */
+    private static final Pattern CALCULATION = Pattern.compile("\\(?(?:.+[+\\-].+|\\d.*|[+\\-].+)\\)?");
+
     private static final Pattern CHARGES =
             Pattern.compile("\\(?[+\\-±]?\\d+(?:/\\d+|\\.\\d+)?(?:[,;][+\\-±]?\\d+(?:/\\d+|\\.\\d+)?)*\\)?");
     private static final Pattern LABEL = Pattern.compile("[vsc]{1,3}|[+\\-]");
@@ -51,7 +54,8 @@ final class Scripts {
             addCount(lexemes, StatementParser.STARS, text.length() - primes, span);
         } else if (exponent.matches()) {
             lexemes.add(exponent(StatementParser.EXPONENT, exponent, span));
-        } else if (POWER_OF_UNKNOWN_SIZE.matcher(text).matches()) {
+        } else if (POWER_OF_UNKNOWN_SIZE.matcher(text).matches()
+                || CALCULATION.matcher(text).matches()) {
             lexemes.add(Lexeme.bare(StatementParser.UNREADABLE, span));
         } else if (!text.isEmpty()) {
             ScriptMeaning meaning =

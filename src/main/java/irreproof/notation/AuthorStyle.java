@@ -1,0 +1,89 @@
+package irreproof.notation;
+
+import irreproof.notation.WrittenTerm.WrittenName;
+import java.util.List;
+import java.util.Map;
+
+/**
+ * How an author writes irreps and sums, learnt from what the author wrote. Every habit has a default, so that a style can
+ * write everything.
+ */
+public final class AuthorStyle {
+    private static final AuthorStyle STANDARD = new AuthorStyle(
+            Map.of(),
+            NameStyle.STANDARD,
+            ListStyle.STANDARD,
+            DiagramStyle.STANDARD,
+            SpinStyle.STANDARD,
+            SumStyle.STANDARD);
+
+    private final Map<WrittenName, String> known;
+    private final NameStyle names;
+    private final ListStyle lists;
+    private final DiagramStyle diagrams;
+    private final SpinStyle spins;
+    private final SumStyle sums;
+
+    /** @param known names the author has written, as written: these are used again letter by letter */
+    AuthorStyle(
+            Map<WrittenName, String> known,
+            NameStyle names,
+            ListStyle lists,
+            DiagramStyle diagrams,
+            SpinStyle spins,
+            SumStyle sums) {
+        this.known = Map.copyOf(known);
+        this.names = names;
+        this.lists = lists;
+        this.diagrams = diagrams;
+        this.spins = spins;
+        this.sums = sums;
+    }
+
+    /** Bold names, {@code \oplus}, repeated terms. */
+    public static AuthorStyle standard() {
+        return STANDARD;
+    }
+
+    /**
+     * @param source the document that the spans of the samples refer to
+     * @param samples the statement to be mended first, then others of the document in the order of their weight; they
+     *     fill in what the first does not show
+     */
+    public static AuthorStyle learn(String source, List<Statement> samples) {
+        return new StyleLearner(source).learn(samples);
+    }
+
+    String write(WrittenName name) {
+        String written = known.get(name);
+        if (written != null) {
+            return written;
+        }
+        if (name instanceof WrittenTerm.Dimension dimension) {
+            return names.write(dimension);
+        }
+        if (name instanceof WrittenTerm.Labels labels) {
+            return lists.write(labels.labels());
+        }
+        return name instanceof WrittenTerm.Diagram diagram
+                ? diagrams.write(diagram.rows())
+                : spins.write(((WrittenTerm.Spin) name).doubled());
+    }
+
+    /** True if a count in front of this name cannot be taken for a name itself. */
+    boolean standsOut(WrittenName name) {
+        if (name instanceof WrittenTerm.Dimension) {
+            return names.styling() == NameStyle.Styling.EACH;
+        }
+        return !(name instanceof WrittenTerm.Spin) || spins.isStyled();
+    }
+
+    /** False if a count would be set in the same face as the names. */
+    boolean canCount(WrittenName name) {
+        return !(name instanceof WrittenTerm.Dimension) || names.styling() != NameStyle.Styling.SWITCHED;
+    }
+
+    SumStyle sums() {
+        return sums;
+    }
+}

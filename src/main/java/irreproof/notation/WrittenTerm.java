@@ -1,0 +1,48 @@
+package irreproof.notation;
+
+import java.math.BigInteger;
+import java.util.List;
+
+/**
+ * One term of a sum to be written: an irrep and how often it occurs.
+ *
+ * @param count 1 or more
+ */
+public record WrittenTerm(BigInteger count, WrittenName name) {
+    public WrittenTerm {
+        if (count.signum() <= 0) {
+            throw new IllegalArgumentException("a term that does not occur: " + count);
+        }
+    }
+
+    /** An irrep by one kind of name. */
+    public sealed interface WrittenName {}
+
+    /**
+     * A dimension name.
+     *
+     * @param label the subscript that is part of the name ({@code v}), or empty
+     */
+    public record Dimension(BigInteger dimension, int bars, int primes, String label) implements WrittenName {}
+
+    /** Dynkin labels, or the entries of any other list in the author's brackets. */
+    public record Labels(List<Integer> labels) implements WrittenName {
+        public Labels {
+            labels = List.copyOf(labels);
+        }
+    }
+
+    /** A Young diagram by its row lengths, longest first; empty for the singlet. */
+    public record Diagram(List<Integer> rows) implements WrittenName {
+        public Diagram {
+            rows = List.copyOf(rows);
+        }
+    }
+
+    /**
+     * A spin.
+     *
+     * @param doubled twice the spin
+     */
+    public record Spin(int doubled) implements WrittenName {}
+}
