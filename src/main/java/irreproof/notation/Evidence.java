@@ -4,7 +4,6 @@ import irreproof.notation.Expression.DiagramName;
 import irreproof.notation.Expression.Face;
 import irreproof.notation.Expression.ListName;
 import irreproof.notation.Expression.NumberName;
-import irreproof.notation.Expression.Power;
 import irreproof.notation.Expression.Sum;
 import irreproof.notation.parser.StatementParser;
 import java.math.BigInteger;
@@ -24,13 +23,15 @@ final class Evidence {
     private final List<NumberName> numbers = new ArrayList<>();
     private final List<ListName> lists = new ArrayList<>();
     private boolean diagram;
-    private boolean power;
+    private final boolean power;
 
     /** @param lexemes those of the sides that were read */
     Evidence(List<Expression> sides, List<Relation> relations, List<Lexeme> lexemes) {
         this.sides = sides;
         this.relations = relations;
         this.lexemes = lexemes;
+        power = lexemes.stream()
+                .anyMatch(lexeme -> lexeme.content() instanceof Lexeme.Exponent exponent && exponent.operatorWritten());
         sides.forEach(this::collect);
     }
 
@@ -41,11 +42,6 @@ final class Evidence {
             lists.add(list);
         } else if (tree instanceof DiagramName name) {
             diagram |= !name.rows().isEmpty();
-        } else if (tree instanceof Power written) {
-            power |= lexemes.stream()
-                    .anyMatch(lexeme -> lexeme.content() instanceof Lexeme.Exponent exponent
-                            && exponent.operatorWritten()
-                            && exponent.exponent() == written.exponent());
         }
         Trees.children(tree).forEach(this::collect);
     }

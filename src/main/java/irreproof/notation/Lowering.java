@@ -5,10 +5,8 @@ import irreproof.latex.Token;
 import irreproof.latex.TokenKind;
 import irreproof.notation.Expression.Face;
 import irreproof.notation.parser.StatementParser;
-import irreproof.text.Span;
 import java.util.ArrayList;
 import java.util.List;
-import java.util.Set;
 
 /**
  * Turns the tokens of a passage into lexemes of the statement grammar: takes the noise of typesetting out, reads numbers
@@ -21,40 +19,12 @@ final class Lowering {
     static final int DEEPEST = 50;
 
     private static final int LONGEST_NUMBER = 40;
-    private static final Set<String> TRANSPARENT_ENVIRONMENTS = Set.of(
-            "split",
-            "aligned",
-            "align",
-            "align*",
-            "gathered",
-            "gather",
-            "gather*",
-            "multline",
-            "multline*",
-            "multlined",
-            "equation",
-            "equation*",
-            "eqnarray",
-            "eqnarray*",
-            "math",
-            "displaymath",
-            "subequations",
-            "center",
-            "flalign",
-            "flalign*",
-            "dmath",
-            "dmath*",
-            "small",
-            "IEEEeqnarray",
-            "IEEEeqnarray*");
-    private static final Set<String> COLUMN_ENVIRONMENTS =
-            Set.of("array", "tabular", "alignedat", "alignat", "alignat*");
-
     private final TokenTape tape;
     private final Budget budget;
     private final YoungReader young;
     private final Noise noise;
     private final Signs signs;
+    private final InnerEnvironments environments;
     private final List<Lexeme> lexemes = new ArrayList<>();
 
     private Lowering(TokenTape tape, Budget budget) {
@@ -63,6 +33,7 @@ final class Lowering {
         young = new YoungReader(tape);
         noise = new Noise(tape);
         signs = new Signs(tape, lexemes);
+        environments = new InnerEnvironments(tape, young, lexemes);
     }
 
     static List<Lexeme> lower(List<Token> tokens, Budget budget) {
@@ -98,7 +69,7 @@ final class Lowering {
             case DIGIT -> number(i, to, face);
             case LETTER -> letters(i, to);
             case OTHER -> character(token, i, to);
-            case SUPERSCRIPT, SUBSCRIPT -> script(i, to);
+            case SUPERSCRIPT, SUBSCRIPT -> Scripts.read(tape, i, to, lexemes);
             case CONTROL_SYMBOL -> symbol(token, i, to);
             case ALIGN -> add(StatementParser.SOFT_BREAK, i, i + 1);
             case PARAGRAPH_BREAK -> add(StatementParser.BREAK, i, i + 1);
@@ -210,47 +181,6 @@ final class Lowering {
         return add(decimal ? StatementParser.UNREADABLE : StatementParser.BREAK, i, end);
     }
 
-    private int script(int i, int to) {
-        TokenTape.Argument argument = tape.argument(i + 1, to);
-        if (argument == null) {
-            return add(StatementParser.UNREADABLE, i, i + 1);
-        }
-        Span span = tape.span(i, argument.next());
-        Lexeme base = last();
-        boolean below = tape.at(i).kind() == TokenKind.SUBSCRIPT;
-        if (base != null && base.is(StatementParser.RELATION)) {
-            return argument.next();
-        }
-        if (base != null && base.is(StatementParser.OTIMES)) {
-            return productScript(base, below, argument, span);
-        }
-        if (!below) {
-            lexemes.addAll(Scripts.superscript(tape, argument, span));
-            return argument.next();
-        }
-        Lexeme.Script script = Scripts.subscript(tape, argument);
-        if (!(script.meaning() instanceof ScriptMeaning.Nothing)) {
-            lexemes.add(new Lexeme(StatementParser.SUBSCRIPT, script, span));
-        }
-        return argument.next();
-    }
-
-    /** {@code \otimes_S}; the ring under a tensor sign ({@code \otimes_{\mathbb{C}}}) says nothing about irreps. */
-    private int productScript(Lexeme base, boolean below, TokenTape.Argument argument, Span span) {
-        Lexeme.Script script = Scripts.subscript(tape, argument);
-        if (below && script.meaning() instanceof ScriptMeaning.Part part) {
-            lexemes.set(
-                    lexemes.size() - 1,
-                    new Lexeme(
-                            StatementParser.OTIMES,
-                            new Lexeme.Projected(part.symmetry()),
-                            base.span().cover(span)));
-        } else if (!below || !script.written().contains("mathbb")) {
-            lexemes.add(Lexeme.bare(StatementParser.UNREADABLE, span));
-        }
-        return argument.next();
-    }
-
     private int symbol(Token token, int i, int to) {
         return switch (token.text()) {
             case "\\" -> {
@@ -299,7 +229,7 @@ final class Lowering {
             return text(i, to, face, depth);
         }
         if (meaning instanceof Commands.FractionOf) {
-            return fraction(i, to, face);
+            return Scripts.fraction(tape, i, to, face, lexemes);
         }
         if (meaning instanceof Commands.PowerHead) {
             int next = Powers.prefix(tape, i, to, lexemes);
@@ -350,7 +280,7 @@ final class Lowering {
             return add(StatementParser.ROUND_CLOSE, argument.to(), argument.next());
         }
         if (meaning instanceof Commands.Environment environment) {
-            return environment(environment.begin(), i, to);
+            return environments.read(environment.begin(), i, to);
         }
         return add(StatementParser.UNREADABLE, i, i + 1);
     }
@@ -429,21 +359,6 @@ final class Lowering {
         return false;
     }
 
-    private int fraction(int i, int to, Face face) {
-        TokenTape.Argument over = tape.argument(tape.skipOptional(i + 1, to), to);
-        TokenTape.Argument under = over == null ? null : tape.argument(over.next(), to);
-        if (under == null) {
-            return add(StatementParser.UNREADABLE, i, i + 1);
-        }
-        String numerator = Scripts.plain(tape, over.from(), over.to());
-        String denominator = Scripts.plain(tape, under.from(), under.to());
-        boolean whole = numerator.matches("\\d{1,9}") && denominator.matches("[1-9]\\d{0,8}");
-        Lexeme.Content content = whole ? new Lexeme.Fraction(numerator, denominator, face) : Lexeme.BARE;
-        lexemes.add(new Lexeme(
-                whole ? StatementParser.FRACTION : StatementParser.UNREADABLE, content, tape.span(i, under.next())));
-        return under.next();
-    }
-
     private int otimes(int i, int to) {
         Lexeme before = last();
         if (before == null || !Adjacency.endsOperand(before)) {
@@ -453,30 +368,5 @@ final class Lowering {
             }
         }
         return add(StatementParser.OTIMES, i, i + 1);
-    }
-
-    private int environment(boolean begin, int i, int to) {
-        TokenTape.Argument name = tape.argument(i + 1, to);
-        if (name == null) {
-            return i + 1;
-        }
-        String environment = tape.text(name.from(), name.to());
-        if (begin && environment.equals("ytableau")) {
-            for (int end = name.next(); end < to; end++) {
-                if (tape.at(end).isWord("end")) {
-                    TokenTape.Argument closing = tape.argument(end + 1, to);
-                    int next = closing == null ? end + 1 : closing.next();
-                    YoungReader.Result result = young.environment(i, tape.skipOptional(name.next(), end), end, next);
-                    lexemes.add(result.lexeme());
-                    return result.next();
-                }
-            }
-        }
-        if (COLUMN_ENVIRONMENTS.contains(environment)) {
-            return begin ? noise.command(name.next() - 1, to, 1) : name.next();
-        }
-        return TRANSPARENT_ENVIRONMENTS.contains(environment)
-                ? begin ? tape.skipOptional(name.next(), to) : name.next()
-                : add(StatementParser.UNREADABLE, i, name.next());
     }
 }

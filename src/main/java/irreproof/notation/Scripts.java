@@ -2,6 +2,7 @@ package irreproof.notation;
 
 import irreproof.latex.Token;
 import irreproof.latex.TokenKind;
+import irreproof.notation.Expression.Face;
 import irreproof.notation.Expression.PowerKind;
 import irreproof.notation.Expression.Symmetry;
 import irreproof.notation.parser.StatementParser;
@@ -16,6 +17,8 @@ import java.util.regex.Pattern;
 
 /** Reads subscripts and superscripts: powers, primes, stars, parts, labels, charges. */
 final class Scripts {
+    private static final Pattern NUMERATOR = Pattern.compile("\\d{1,9}");
+    private static final Pattern DENOMINATOR = Pattern.compile("[1-9]\\d{0,8}");
     private static final Pattern PRIMES_AND_STARS = Pattern.compile("['*]+");
     private static final Pattern EXPONENT = Pattern.compile("([⊗∧⊙∨]?)\\(?(\\d{1,6})\\)?");
     private static final Pattern POWER_OF_UNKNOWN_SIZE = Pattern.compile(".*[⊗∧⊙∨].*");
@@ -43,8 +46,67 @@ final class Scripts {
 
     private Scripts() {}
 
+    /** Reads the script that begins here and returns where reading goes on. */
+    static int read(TokenTape tape, int i, int to, List<Lexeme> lexemes) {
+        TokenTape.Argument argument = tape.argument(i + 1, to);
+        if (argument == null) {
+            lexemes.add(Lexeme.bare(StatementParser.UNREADABLE, tape.span(i, i + 1)));
+            return i + 1;
+        }
+        Span span = tape.span(i, argument.next());
+        Lexeme base = lexemes.isEmpty() ? null : lexemes.get(lexemes.size() - 1);
+        boolean below = tape.at(i).kind() == TokenKind.SUBSCRIPT;
+        if (base != null && base.is(StatementParser.OTIMES)) {
+            productScript(subscript(tape, argument), below, span, lexemes);
+        } else if (base == null || !base.is(StatementParser.RELATION)) {
+            if (below) {
+                addSubscript(subscript(tape, argument), span, lexemes);
+            } else {
+                lexemes.addAll(superscript(tape, argument, span));
+            }
+        }
+        return argument.next();
+    }
+
+    private static void addSubscript(Lexeme.Script script, Span span, List<Lexeme> lexemes) {
+        if (!(script.meaning() instanceof ScriptMeaning.Nothing)) {
+            lexemes.add(new Lexeme(StatementParser.SUBSCRIPT, script, span));
+        }
+    }
+
+    /** {@code \otimes_S}; the ring under a tensor sign ({@code \otimes_{\mathbb{C}}}) says nothing about irreps. */
+    private static void productScript(Lexeme.Script script, boolean below, Span span, List<Lexeme> lexemes) {
+        int last = lexemes.size() - 1;
+        if (below && script.meaning() instanceof ScriptMeaning.Part part) {
+            Span whole = lexemes.get(last).span().cover(span);
+            lexemes.set(last, new Lexeme(StatementParser.OTIMES, new Lexeme.Projected(part.symmetry()), whole));
+        } else if (!below || !script.written().contains("mathbb")) {
+            lexemes.add(Lexeme.bare(StatementParser.UNREADABLE, span));
+        }
+    }
+
+    /** Reads a fraction command; only fractions of whole numbers can be read. */
+    static int fraction(TokenTape tape, int i, int to, Face face, List<Lexeme> lexemes) {
+        TokenTape.Argument over = tape.argument(tape.skipOptional(i + 1, to), to);
+        TokenTape.Argument under = over == null ? null : tape.argument(over.next(), to);
+        if (under == null) {
+            lexemes.add(Lexeme.bare(StatementParser.UNREADABLE, tape.span(i, i + 1)));
+            return i + 1;
+        }
+        String numerator = plain(tape, over.from(), over.to());
+        String denominator = plain(tape, under.from(), under.to());
+        Span span = tape.span(i, under.next());
+        boolean whole = NUMERATOR.matcher(numerator).matches()
+                && DENOMINATOR.matcher(denominator).matches();
+        lexemes.add(
+                whole
+                        ? new Lexeme(StatementParser.FRACTION, new Lexeme.Fraction(numerator, denominator, face), span)
+                        : Lexeme.bare(StatementParser.UNREADABLE, span));
+        return under.next();
+    }
+
     /** The lexemes of a superscript; none if it says nothing. */
-    static List<Lexeme> superscript(TokenTape tape, TokenTape.Argument argument, Span span) {
+    private static List<Lexeme> superscript(TokenTape tape, TokenTape.Argument argument, Span span) {
         String text = plain(tape, argument.from(), argument.to());
         List<Lexeme> lexemes = new ArrayList<>();
         Matcher exponent = EXPONENT.matcher(text);
@@ -89,7 +151,7 @@ final class Scripts {
         return exponent.matches() && exponent.group(1).isEmpty() ? Integer.parseInt(exponent.group(2)) : -1;
     }
 
-    static Lexeme.Script subscript(TokenTape tape, TokenTape.Argument argument) {
+    private static Lexeme.Script subscript(TokenTape tape, TokenTape.Argument argument) {
         return script(meaning(plain(tape, argument.from(), argument.to())), tape, argument);
     }
 

@@ -46,16 +46,9 @@ final class SideReader {
      */
     Side read(List<Lexeme> lexemes, boolean otimesIsProduct, Budget budget) {
         budget.spend(lexemes.size());
-        int depth = 0;
-        for (Lexeme lexeme : lexemes) {
-            if (lexeme.is(StatementParser.UNREADABLE)) {
-                return problem("this is not read as a representation", lexeme.span());
-            }
-            depth += Adjacency.opens(lexeme) ? 1 : 0;
-            depth -= Adjacency.closesBracket(lexeme) || lexeme.is(StatementParser.GROUP_CLOSE) ? 1 : 0;
-            if (depth > DEEPEST || lexeme.is(StatementParser.PREFIX) && lexemes.size() > 100_000) {
-                return problem("the brackets are nested too deeply", lexeme.span());
-            }
+        Statement.Problem obstacle = obstacle(lexemes);
+        if (obstacle != null) {
+            return new Side(null, obstacle);
         }
         StatementParser.SideContext context;
         try {
@@ -72,6 +65,24 @@ final class SideReader {
         } catch (UnreadableSide unreadable) {
             return problem(unreadable.getMessage(), unreadable.span());
         }
+    }
+
+    /** Something unreadable, or brackets, prefixes or marks that would make the tree too deep. */
+    private static Statement.Problem obstacle(List<Lexeme> lexemes) {
+        int depth = 0;
+        int attached = 0;
+        for (Lexeme lexeme : lexemes) {
+            if (lexeme.is(StatementParser.UNREADABLE)) {
+                return new Statement.Problem("this is not read as a representation", lexeme.span());
+            }
+            depth += Adjacency.opens(lexeme) ? 1 : 0;
+            depth -= Adjacency.closesBracket(lexeme) || lexeme.is(StatementParser.GROUP_CLOSE) ? 1 : 0;
+            attached = Adjacency.isMark(lexeme) || lexeme.is(StatementParser.PREFIX) ? attached + 1 : 0;
+            if (depth > DEEPEST || attached > DEEPEST) {
+                return new Statement.Problem("this is nested too deeply", lexeme.span());
+            }
+        }
+        return null;
     }
 
     private StatementParser.SideContext parse(List<Lexeme> lexemes, PredictionMode mode) {

@@ -11,6 +11,9 @@ import java.util.List;
 
 /** The tokens of a passage with their matching braces, and how far the argument of a command reaches. */
 final class TokenTape {
+    /** An optional argument longer than this is none: keeps reading linear. */
+    static final int FARTHEST_BRACKET = 1000;
+
     private static final int NONE = -1;
 
     private final List<Token> tokens;
@@ -134,7 +137,7 @@ final class TokenTape {
     /** The square bracket that closes the one that begins here, over whole groups; negative if there is none. */
     int closingBracket(int open, int end) {
         int depth = 0;
-        for (int i = open; i < end; i++) {
+        for (int i = open; i < Math.min(end, open + FARTHEST_BRACKET); i++) {
             if (at(i).isCharacter('[')) {
                 depth++;
             } else if (at(i).isCharacter(']') && --depth == 0) {

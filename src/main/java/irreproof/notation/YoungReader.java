@@ -118,7 +118,7 @@ final class YoungReader {
         if (!tape.isCharacter(open, end, '(')) {
             return -1;
         }
-        for (int i = open + 1; i < end; i++) {
+        for (int i = open + 1; i < Math.min(end, open + TokenTape.FARTHEST_BRACKET); i++) {
             if (tape.at(i).isCharacter(')')) {
                 return i;
             }
