@@ -19,13 +19,13 @@ final class Choices {
     boolean carryOut(Token word) {
         switch (word.text()) {
             case "IfNoValueTF", "IfNoValueT", "IfNoValueF":
-                choose(word, stands(Arguments.NO_VALUE));
+                choose(word, stands(ArgumentScanner.NO_VALUE));
                 return true;
             case "IfValueTF", "IfValueT", "IfValueF":
-                choose(word, !stands(Arguments.NO_VALUE));
+                choose(word, !stands(ArgumentScanner.NO_VALUE));
                 return true;
             case "IfBooleanTF", "IfBooleanT", "IfBooleanF":
-                choose(word, stands(Arguments.TRUE));
+                choose(word, stands(ArgumentScanner.TRUE));
                 return true;
             case "IfBlankTF", "IfBlankT", "IfBlankF":
                 choose(word, isBlank(arguments.mandatory()));

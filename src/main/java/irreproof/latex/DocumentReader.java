@@ -1,6 +1,5 @@
 package irreproof.latex;
 
-import irreproof.budget.BudgetExceeded;
 import irreproof.text.SourceText;
 import irreproof.text.Span;
 import java.util.ArrayList;
@@ -42,38 +41,15 @@ final class DocumentReader {
         this.shared = shared;
         this.inclusions = inclusions;
         this.expander = new Expander(source.path(), source.content(), shared, inclusions);
-        this.preamble = hasPreamble(source.content());
+        this.preamble = Preamble.opens(source.content());
     }
 
-    /** True if a {@code \begin{document}} stands outside a comment. */
-    private static boolean hasPreamble(String text) {
-        int at = text.indexOf("\\begin{document}");
-        while (at >= 0) {
-            int i = at;
-            while (i > 0 && text.charAt(i - 1) != '\n' && text.charAt(i - 1) != '\r' && text.charAt(i) != '%') {
-                i--;
-            }
-            if (text.charAt(i) != '%') {
-                return true;
-            }
-            at = text.indexOf("\\begin{document}", at + 1);
-        }
-        return false;
-    }
-
-    LatexDocument read(List<SourceText> preambles) {
-        try {
-            inclusions.begin(source.path());
-            for (SourceText file : preambles) {
-                inclusions.read(file, false);
-            }
-            Token token = expander.next();
-            while (token != null && !ended) {
-                accept(token);
-                token = expander.next();
-            }
-        } catch (BudgetExceeded exceeded) {
-            shared.report("reading stopped: " + exceeded.getMessage());
+    LatexDocument read(List<SourceText> roots) {
+        roots.forEach(inclusions::readRoot);
+        Token token = expander.next();
+        while (token != null && !ended) {
+            accept(token);
+            token = expander.next();
         }
         endParagraph();
         return new LatexDocument(

@@ -147,6 +147,12 @@ final class Expander {
         shared.report(problem);
     }
 
+    /** Nothing more is read of this source. */
+    void stop() {
+        waiting.clear();
+        lexer.stop();
+    }
+
     /** The next token that means something to a reader, or null at the end. */
     Token next() {
         while (true) {

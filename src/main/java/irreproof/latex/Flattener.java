@@ -3,7 +3,6 @@ package irreproof.latex;
 import irreproof.text.Span;
 import java.util.AbstractList;
 import java.util.Arrays;
-import java.util.BitSet;
 import java.util.RandomAccess;
 
 /**
@@ -20,12 +19,12 @@ final class Flattener {
     private int unseenDepth;
     private boolean unseenBracket;
     /** Where the text of each open group that is an index starts, or -1 for any other group. */
-    private int[] groups = new int[64];
+    private int[] indices = new int[64];
 
-    private final BitSet textGroups = new BitSet();
+    private final TextGroups groups = new TextGroups();
+
     private int depth;
     private boolean indexNext;
-    private boolean textNext;
     private boolean spaceNext;
 
     void mathMode(boolean on) {
@@ -37,10 +36,8 @@ final class Flattener {
             return;
         }
         boolean index = indexNext;
-        boolean text = textNext;
         if (token.kind() != TokenKind.SPACE) {
             indexNext = false;
-            textNext = false;
         }
         switch (token.kind()) {
             case LETTER, DIGIT, OTHER -> {
@@ -50,7 +47,7 @@ final class Flattener {
                 append(token.text(), token.span());
             }
             case SPACE -> {
-                if (!mathMode || inText() || token.text().equals("~")) {
+                if (!mathMode || groups.inText() || token.text().equals("~")) {
                     blank(token.span());
                 }
             }
@@ -60,27 +57,24 @@ final class Flattener {
                 append(token.text(), token.span());
                 indexNext = true;
             }
-            case BEGIN_GROUP -> open(index, text, token.span());
+            case BEGIN_GROUP -> open(index, token.span());
             case END_GROUP -> close(token.span());
             case CONTROL_SYMBOL -> symbol(token);
-            case CONTROL_WORD -> word(token);
+            case CONTROL_WORD -> word(token, index);
             case INLINE_SHIFT, DISPLAY_SHIFT, COMMENT, VERBATIM, PARAMETER -> {
                 // nothing a reader sees
             }
         }
+        groups.accept(token);
         spaceNext = token.isWord("xspace");
     }
 
-    private boolean inText() {
-        return depth > 0 && textGroups.get(depth - 1);
-    }
-
-    private void open(boolean index, boolean text, Span span) {
-        if (depth == groups.length) {
-            groups = Arrays.copyOf(groups, 2 * depth);
+    private void open(boolean index, Span span) {
+        int depth = groups.depth();
+        if (depth == indices.length) {
+            indices = Arrays.copyOf(indices, 2 * depth);
         }
-        textGroups.set(depth, text || inText());
-        groups[depth++] = index ? this.text.length() : -1;
+        indices[depth] = index ? text.length() : -1;
         if (index) {
             append("{", span);
         }
@@ -88,10 +82,7 @@ final class Flattener {
 
     /** Closes a group; an index of one character loses its braces. */
     private void close(Span span) {
-        if (depth == 0) {
-            return;
-        }
-        int start = groups[--depth];
+        int start = groups.depth() == 0 ? -1 : indices[groups.depth() - 1];
         if (start < 0) {
             return;
         }
@@ -121,7 +112,7 @@ final class Flattener {
         }
     }
 
-    private void word(Token token) {
+    private void word(Token token, boolean index) {
         String word = token.text();
         String shown = Glyphs.shown(word);
         if (" ".equals(shown)) {
@@ -130,8 +121,7 @@ final class Flattener {
             append(shown, token.span());
         }
         unseen = Glyphs.unseenArguments(word);
-        textNext = word.startsWith("text") || word.equals("mbox") || word.equals("intertext");
-        indexNext = false;
+        indexNext = index && shown == null;
     }
 
     /** True if the token belongs to an argument that is left out. */
@@ -152,6 +142,10 @@ final class Flattener {
                 unseen = unseen.substring(1);
             }
             return true;
+        }
+        if (token.kind() == TokenKind.SPACE && unseen.equals("o")) {
+            unseen = "";
+            return false;
         }
         if (token.kind() == TokenKind.SPACE || token.isCharacter('*')) {
             return true;

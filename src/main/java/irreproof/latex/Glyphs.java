@@ -38,7 +38,6 @@ final class Glyphs {
         shown("'", "prime");
         shown("…", "dots ldots cdots");
         shown("/", "slash");
-        shown("ℝ", "R");
         shown(
                 " ",
                 "quad qquad enspace thinspace medspace thickspace space hfill hspace vspace par item newline "
@@ -51,8 +50,8 @@ final class Glyphs {
         for (int i = 0; i < greek.length; i += 2) {
             SHOWN.put(greek[i], greek[i + 1]);
         }
-        // groups under the names that widely used packages and authors' private styles give them
-        for (String group : "SU SO Sp USp Spin Pin SL GL PSL PSU SP su usp".split(" ")) {
+        // groups and fields under the names that widely used packages and authors' private styles give them
+        for (String group : "SU SO Sp USp Spin Pin SL GL PSL PSU SP su usp U C R Z N Q".split(" ")) {
             SHOWN.put(group, group);
         }
         SHOWN.put("specialUnitary", "SU");
@@ -63,19 +62,19 @@ final class Glyphs {
         SHOWN.put("symplecticLie", "sp");
         SHOWN.put("unitary", "U");
         SHOWN.put("unitaryLie", "u");
-        SHOWN.remove("R");
-
         unseen(
                 "m",
                 "label ref eqref cref Cref autoref pageref nameref hypertarget bibliography bibliographystyle "
                         + "pagestyle thispagestyle vskip phantom hphantom vphantom graphicspath setcounter color index "
                         + "tikzset newtheorem theoremstyle newcounter affiliation email pacs preprint vspace hspace "
                         + "bibitem tag");
-        unseen("om", "cite citep citet citealp parencite textcite footcite autocite includegraphics usetikzlibrary");
+        unseen(
+                "om",
+                "xrightarrow xleftarrow cite citep citet citealp parencite textcite footcite autocite includegraphics usetikzlibrary");
         unseen("mm", "addtocounter setlength addtolength newlength");
         unseen("omm", "multicolumn");
-        unseen("o", "item xrightarrow linebreak pagebreak maketitle");
-        unseen("m", "textcolor colorbox fontsize");
+        unseen("o", "linebreak pagebreak maketitle");
+        unseen("m", "overset underset stackrel textcolor colorbox fontsize");
     }
 
     private Glyphs() {}

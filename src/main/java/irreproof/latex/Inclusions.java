@@ -5,28 +5,40 @@ import java.util.HashSet;
 import java.util.Optional;
 import java.util.Set;
 
-/** Reads the files a document includes, for their definitions only. Each package once; cycles and depth are limited. */
+/**
+ * Reads the files a document includes, for their definitions only. Each package is read once; cycles, depth and number
+ * are limited. A file that is not found says nothing: most packages are installed ones.
+ */
 final class Inclusions {
     private static final int DEEPEST = 20;
     private static final int MOST = 500;
 
     private final SourceProvider sources;
     private final Expander.Shared shared;
+    private final String main;
     private final Set<String> reading = new HashSet<>();
     private final Set<String> packages = new HashSet<>();
     private int files;
+    /** True while the body of the document that the main source belongs to is being read. */
+    private boolean insideRootBody;
 
-    Inclusions(SourceProvider sources, Expander.Shared shared) {
+    private boolean reachedMain;
+
+    /** @param main the path of the document that is read; a file that includes it does not make it read twice */
+    Inclusions(String main, SourceProvider sources, Expander.Shared shared) {
+        this.main = main;
         this.sources = sources;
         this.shared = shared;
     }
 
     /** True if the word was an including command; it and its arguments are then used up. */
     boolean carryOut(Token word, Expander expander) {
-        Arguments arguments = expander.arguments();
         switch (word.text()) {
-            case "input", "include", "subfile":
-                include(expander, fileName(expander), ".tex");
+            case "input":
+                include(expander, true);
+                return true;
+            case "include", "subfile":
+                include(expander, !insideRootBody);
                 return true;
             case "usepackage", "RequirePackage":
                 packages(expander, ".sty");
@@ -48,9 +60,32 @@ final class Inclusions {
             return;
         }
         for (String name : names.split(",")) {
-            if (packages.add(name.strip() + extension)) {
-                sources.find(expander.path(), name.strip() + extension).ifPresent(file -> read(file, true));
+            String file = name.strip() + extension;
+            if (packages.add(file)) {
+                sources.find(expander.path(), file).ifPresent(found -> read(found, true));
             }
+        }
+    }
+
+    private void include(Expander expander, boolean wanted) {
+        String name = fileName(expander);
+        if (name == null || name.isEmpty()) {
+            return;
+        }
+        Optional<SourceText> file = sources.find(expander.path(), name);
+        if (file.isEmpty() && !name.endsWith(".tex")) {
+            file = sources.find(expander.path(), name + ".tex");
+        }
+        if (file.isEmpty()) {
+            return;
+        }
+        if (file.get().path().equals(main)) {
+            reachedMain = true;
+        } else if (wanted) {
+            read(file.get(), false);
+        }
+        if (reachedMain) {
+            expander.stop();
         }
     }
 
@@ -77,27 +112,17 @@ final class Inclusions {
         return name.toString();
     }
 
-    private void include(Expander expander, String name, String extension) {
-        if (name == null || name.isEmpty()) {
-            return;
-        }
-        Optional<SourceText> file = sources.find(expander.path(), name);
-        if (file.isEmpty() && !name.endsWith(extension)) {
-            file = sources.find(expander.path(), name + extension);
-        }
-        file.ifPresent(found -> read(found, false));
-    }
-
     /** Carries out what the file defines. */
-    void read(SourceText file, boolean atIsLetter) {
-        if (reading.size() >= DEEPEST || files >= MOST) {
-            shared.report("too many files included, " + file.path() + " is left out");
+    private void read(SourceText file, boolean atIsLetter) {
+        if (reading.contains(file.path())) {
             return;
         }
-        if (!reading.add(file.path())) {
+        if (reading.size() >= DEEPEST || files >= MOST) {
+            shared.report("too many files are included; " + file.path() + " is left out");
             return;
         }
         files++;
+        reading.add(file.path());
         Expander expander = new Expander(file.path(), file.content(), shared, this);
         expander.lexer().atIsLetter(atIsLetter);
         while (expander.next() != null) {
@@ -106,8 +131,26 @@ final class Inclusions {
         reading.remove(file.path());
     }
 
-    /** The main document counts as being read, lest a file includes it. */
-    void begin(String path) {
-        reading.add(path);
+    /**
+     * Carries out what the document that the main source belongs to defines before it includes the main source. Other
+     * chapters are left out: to read a whole book for each of its chapters would take too long.
+     */
+    void readRoot(SourceText root) {
+        reading.add(root.path());
+        reachedMain = root.path().equals(main);
+        Expander expander = new Expander(root.path(), root.content(), shared, this);
+        while (!reachedMain) {
+            Token token = expander.next();
+            if (token == null
+                    || token.isWord("end")
+                            && "document".equals(expander.arguments().name())) {
+                break;
+            }
+            insideRootBody |= token.isWord("begin")
+                    && "document".equals(expander.arguments().name());
+        }
+        insideRootBody = false;
+        reachedMain = false;
+        reading.remove(root.path());
     }
 }

@@ -1,8 +1,6 @@
 package irreproof.latex;
 
 import irreproof.text.Span;
-import java.util.HashSet;
-import java.util.Set;
 
 /**
  * Cuts one source into tokens, one at a time and only forwards, so that a definition may change how the rest is cut.
@@ -13,22 +11,6 @@ import java.util.Set;
  */
 final class Lexer {
     private static final String[] CHARACTERS = new String[128];
-    private static final Set<String> VERBATIM_ENVIRONMENTS = Set.of(
-            "verbatim",
-            "verbatim*",
-            "Verbatim",
-            "Verbatim*",
-            "BVerbatim",
-            "LVerbatim",
-            "lstlisting",
-            "minted",
-            "comment",
-            "filecontents",
-            "filecontents*",
-            "alltt",
-            "luacode",
-            "luacode*");
-    private static final int LONGEST_ENVIRONMENT_NAME = 40;
 
     static {
         for (char c = 0; c < CHARACTERS.length; c++) {
@@ -37,7 +19,7 @@ final class Lexer {
     }
 
     private final String text;
-    private final Set<String> verbatim = new HashSet<>(VERBATIM_ENVIRONMENTS);
+    private final OpaqueText opaque;
     private int position;
     private boolean atIsLetter;
     private boolean afterWord;
@@ -45,6 +27,7 @@ final class Lexer {
 
     Lexer(String text) {
         this.text = text;
+        this.opaque = new OpaqueText(text);
     }
 
     /** The token for one character, as it would come out of a source (letters, digits and others alone). */
@@ -60,11 +43,12 @@ final class Lexer {
 
     /** Treats the bodies of this environment as opaque from here on. */
     void addVerbatimEnvironment(String name) {
-        verbatim.add(name);
+        opaque.addEnvironment(name);
     }
 
-    int position() {
-        return position;
+    /** Goes to the end. */
+    void stop() {
+        position = text.length();
     }
 
     /** The next token, or null at the end. */
@@ -188,9 +172,10 @@ final class Lexer {
         }
         position = end;
         String word = text.substring(start + 1, end);
-        Token opaque = opaque(word, start);
-        if (opaque != null) {
-            return opaque;
+        OpaqueText.Stretch stretch = opaque.behind(word, position);
+        if (stretch != null) {
+            position = stretch.end();
+            return token(TokenKind.VERBATIM, stretch.body().of(text), start);
         }
         afterWord = true;
         return token(TokenKind.CONTROL_WORD, word, start);
@@ -224,87 +209,6 @@ final class Lexer {
         atLineStart = lineEnd;
     }
 
-    /** A command whose argument TeX does not read as TeX, or null. Called with the position behind the word. */
-    private Token opaque(String word, int start) {
-        return switch (word) {
-            case "begin" -> verbatimEnvironment(start);
-            case "verb", "Verb" -> delimited(start, position);
-            case "lstinline" -> delimited(start, skipBracketed(position, '[', ']'));
-            case "mintinline" -> delimited(start, skipBracketed(skipBracketed(position, '[', ']'), '{', '}'));
-            case "url", "path", "nolinkurl", "href" -> address(start);
-            default -> null;
-        };
-    }
-
-    private Token verbatimEnvironment(int start) {
-        if (position >= text.length() || text.charAt(position) != '{') {
-            return null;
-        }
-        int last = Math.min(text.length(), position + LONGEST_ENVIRONMENT_NAME);
-        int close = position + 1;
-        while (close < last && text.charAt(close) != '}') {
-            close++;
-        }
-        if (close == last) {
-            return null;
-        }
-        String name = text.substring(position + 1, close);
-        if (!verbatim.contains(name)) {
-            return null;
-        }
-        String closing = "\\end{" + name + "}";
-        int end = text.indexOf(closing, close);
-        position = end < 0 ? text.length() : end + closing.length();
-        return token(TokenKind.VERBATIM, text.substring(close + 1, end < 0 ? text.length() : end), start);
-    }
-
-    private Token delimited(int start, int from) {
-        int open = from < text.length() && text.charAt(from) == '*' ? from + 1 : from;
-        if (open >= text.length() || isLineEnd(text.charAt(open))) {
-            return null;
-        }
-        char closer = text.charAt(open) == '{' ? '}' : text.charAt(open);
-        int close = open + 1;
-        while (close < text.length() && text.charAt(close) != closer && !isLineEnd(text.charAt(close))) {
-            close++;
-        }
-        boolean closed = close < text.length() && text.charAt(close) == closer;
-        position = closed ? close + 1 : close;
-        return token(TokenKind.VERBATIM, text.substring(open + 1, close), start);
-    }
-
-    private Token address(int start) {
-        if (position >= text.length() || text.charAt(position) != '{') {
-            return null;
-        }
-        int open = position;
-        int end = skipBracketed(open, '{', '}');
-        if (end == open) {
-            return null;
-        }
-        position = end;
-        return token(TokenKind.VERBATIM, text.substring(open + 1, end - 1), start);
-    }
-
-    /** Behind a bracketed stretch that closes on the same line, or where it was asked to start. */
-    private int skipBracketed(int from, char opener, char closer) {
-        if (from >= text.length() || text.charAt(from) != opener) {
-            return from;
-        }
-        int depth = 0;
-        for (int i = from; i < text.length(); i++) {
-            char c = text.charAt(i);
-            if (c == opener) {
-                depth++;
-            } else if (c == closer && --depth == 0) {
-                return i + 1;
-            } else if (isLineEnd(c)) {
-                return from;
-            }
-        }
-        return from;
-    }
-
     private int lineEnd(int from) {
         int end = from;
         while (end < text.length() && !isLineEnd(text.charAt(end))) {
@@ -321,7 +225,7 @@ final class Lexer {
         return c == ' ' || c == '\n' || c == '\r' || c == '\t';
     }
 
-    private static boolean isLineEnd(char c) {
+    static boolean isLineEnd(char c) {
         return c == '\n' || c == '\r';
     }
 

@@ -3,7 +3,6 @@ package irreproof.latex;
 import irreproof.text.Span;
 import java.util.ArrayDeque;
 import java.util.ArrayList;
-import java.util.BitSet;
 import java.util.Deque;
 import java.util.List;
 import java.util.Set;
@@ -13,37 +12,9 @@ import java.util.Set;
  * paragraph, at the next display or heading, so that one missing dollar costs one passage; a table may hold paragraphs.
  */
 final class PassageReader {
-    private static final Set<String> TEXT_COMMANDS = Set.of(
-            "text",
-            "mbox",
-            "hbox",
-            "textrm",
-            "textbf",
-            "textit",
-            "textsf",
-            "textnormal",
-            "intertext",
-            "shortintertext",
-            "makebox",
-            "fbox",
-            "multicolumn",
-            "footnote",
-            "tag",
-            "parbox",
-            "raisebox",
-            "textcolor");
-    private static final Set<String> NEVER_INSIDE = Set.of(
-            "part",
-            "chapter",
-            "section",
-            "subsection",
-            "subsubsection",
-            "paragraph",
-            "bibliography",
-            "maketitle",
-            "item",
-            "bibitem",
-            "caption");
+    private static final Set<String> SECTIONING = Set.of(
+            "part", "chapter", "section", "subsection", "subsubsection", "paragraph", "bibliography", "maketitle");
+    private static final Set<String> OUTSIDE_FORMULAS = Set.of("item", "bibitem", "caption");
 
     private final Expander expander;
     private final Flattener prose;
@@ -51,12 +22,8 @@ final class PassageReader {
     private final boolean table;
     private final List<Token> tokens = new ArrayList<>();
     private final Deque<String> environments = new ArrayDeque<>();
-    /** For each open group, whether it holds text, where a dollar opens mathematics. */
-    private final BitSet textGroups = new BitSet();
-
-    private int depth;
+    private final TextGroups groups = new TextGroups();
     private int groupsBefore;
-    private boolean textNext;
     private boolean shifted;
     private Span span;
     private boolean closed;
@@ -125,28 +92,27 @@ final class PassageReader {
 
     /** Takes one token in; false if the passage ended. */
     private boolean accept(Token token) {
-        boolean text = textNext;
-        textNext = false;
         switch (token.kind()) {
             case INLINE_SHIFT:
                 return inlineShift(token);
             case DISPLAY_SHIFT:
                 return displayShift(token);
+            case CONTROL_WORD:
+                return word(token);
             case PARAGRAPH_BREAK:
-                if (table || inText()) {
-                    break;
+                if (!table) {
+                    expander.push(token);
+                    return false;
                 }
-                expander.push(token);
-                return false;
+                closeFormulaOfCell(token);
+                break;
             case BEGIN_GROUP:
-                textGroups.set(depth++, text || inText());
                 expander.macros().openGroup();
                 break;
             case END_GROUP:
-                if (depth == 0) {
+                if (groups.depth() == 0) {
                     return stray(token);
                 }
-                depth--;
                 expander.macros().closeGroup();
                 break;
             case ALIGN:
@@ -157,11 +123,6 @@ final class PassageReader {
                     closeFormulaOfCell(token);
                 }
                 break;
-            case SPACE:
-                textNext = text;
-                break;
-            case CONTROL_WORD:
-                return word(token);
             default:
                 break;
         }
@@ -180,7 +141,7 @@ final class PassageReader {
 
     /** A formula in a table's cell ends with the cell at the latest. */
     private void closeFormulaOfCell(Token token) {
-        if (shifted && depth == 0 && environments.size() == 1) {
+        if (shifted && groups.depth() == 0 && environments.size() == 1) {
             inlineShift(new Token(
                     TokenKind.INLINE_SHIFT,
                     "$",
@@ -188,18 +149,15 @@ final class PassageReader {
         }
     }
 
-    private boolean inText() {
-        return depth > 0 && textGroups.get(depth - 1);
-    }
-
     private void add(Token token) {
         span = span.cover(token.span());
         tokens.add(token);
+        groups.accept(token);
         prose.accept(token);
     }
 
     private boolean inlineShift(Token token) {
-        if (table || inText()) {
+        if (table || groups.inText()) {
             shifted = !shifted;
             mathMode(shifted);
             add(token);
@@ -251,11 +209,10 @@ final class PassageReader {
             ensuredMathematics(token);
             return true;
         }
-        if (NEVER_INSIDE.contains(name) && !inText() && !table) {
+        if (SECTIONING.contains(name) || OUTSIDE_FORMULAS.contains(name) && !table) {
             expander.push(token);
             return false;
         }
-        textNext = TEXT_COMMANDS.contains(name);
         add(token);
         return true;
     }

@@ -1,30 +1,38 @@
 package irreproof.latex;
 
 import irreproof.budget.Budget;
+import irreproof.budget.BudgetExceeded;
 import irreproof.text.SourceText;
 import java.util.List;
 import java.util.Optional;
 
-/** Reads one source: lexing, macro definitions, expansion, passages, headings, prose. Never throws on any input. */
+/**
+ * Reads one source: lexing, macro definitions, expansion, passages, headings, prose. Takes any input: what cannot be read
+ * is left out or becomes one of the document's problems. One step of the budget is one token.
+ */
 public final class Reader {
     private static final String SNIPPET = "-";
 
     private Reader() {}
 
+    /** @throws BudgetExceeded if the budget is cancelled, late, or too small for the source */
     public static LatexDocument read(SourceText source, SourceProvider sources, Budget budget) {
-        return read(source, List.of(), sources, budget);
+        return read(source, sources.preambles(source.path()), sources, budget);
     }
 
     /**
      * Reads a source whose macros stand elsewhere too: a chapter without its own preamble.
      *
-     * @param preambles files read before the source, for their definitions only
+     * @param roots the documents that include the source, for what they define before they do so
+     * @throws BudgetExceeded if the budget is cancelled, late, or too small for the source
      */
-    public static LatexDocument read(
-            SourceText source, List<SourceText> preambles, SourceProvider sources, Budget budget) {
+    public static LatexDocument read(SourceText source, List<SourceText> roots, SourceProvider sources, Budget budget) {
+        return reader(source, sources, budget).read(roots);
+    }
+
+    private static DocumentReader reader(SourceText source, SourceProvider sources, Budget budget) {
         Expander.Shared shared = new Expander.Shared(budget);
-        Inclusions inclusions = new Inclusions(sources, shared);
-        return new DocumentReader(source, shared, inclusions).read(preambles);
+        return new DocumentReader(source, shared, new Inclusions(source.path(), sources, shared));
     }
 
     /** A snippet typed on the command line or in a directive, flattened; spans refer to the snippet. */
@@ -39,7 +47,6 @@ public final class Reader {
      */
     public static Optional<Passage> passage(String snippet) {
         SourceText source = new SourceText(SNIPPET, snippet);
-        Expander.Shared shared = new Expander.Shared(Budget.unlimited());
-        return new DocumentReader(source, shared, new Inclusions(SourceProvider.none(), shared)).formula();
+        return reader(source, SourceProvider.none(), Budget.unlimited()).formula();
     }
 }

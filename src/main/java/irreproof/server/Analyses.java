@@ -4,6 +4,7 @@ import irreproof.check.CheckOptions;
 import irreproof.check.FileReport;
 import irreproof.server.transport.EditorClient;
 import irreproof.server.transport.Failures;
+import irreproof.workspace.RememberedSources;
 import java.time.Duration;
 import java.util.HashMap;
 import java.util.List;
@@ -11,7 +12,9 @@ import java.util.Map;
 import java.util.Optional;
 import java.util.Set;
 import java.util.concurrent.ConcurrentHashMap;
+import java.util.function.Predicate;
 import java.util.function.Supplier;
+import org.eclipse.lsp4j.Diagnostic;
 import org.eclipse.lsp4j.MessageParams;
 import org.eclipse.lsp4j.MessageType;
 
@@ -48,15 +51,34 @@ final class Analyses {
     }
 
     /** Analyses a document right now. */
-    void start(Document document, CheckOptions options) {
-        AnalysisRun run = replace(document, options);
+    void start(Document document, RememberedSources sources) {
+        AnalysisRun run = replace(document, sources);
         workers.run(() -> begin(run));
     }
 
     /** Analyses a document when its author pauses, or as soon as a feature asks. */
-    void startSoon(Document document, CheckOptions options) {
-        AnalysisRun run = replace(document, options);
+    void startSoon(Document document, RememberedSources sources) {
+        AnalysisRun run = replace(document, sources);
         workers.runAfter(pause, () -> begin(run));
+    }
+
+    /** The other documents whose analysis must be done again when this one has another text. */
+    List<Document> dependents(Document changed) {
+        return dependents(changed, run -> run.dependsOn(changed));
+    }
+
+    /** The same when this one has come or gone: it may now be found, or be another file than before. */
+    List<Document> dependentsOnPresence(Document changed) {
+        return dependents(
+                changed, run -> run.dependsOn(changed) || run.sources().isLacking());
+    }
+
+    private List<Document> dependents(Document changed, Predicate<AnalysisRun> depends) {
+        return runs.values().stream()
+                .filter(run -> !run.document().uri().equals(changed.uri()))
+                .filter(depends)
+                .map(AnalysisRun::document)
+                .toList();
     }
 
     /** The analysis of the newest version, begun at once if it still waited for a pause. */
@@ -70,8 +92,8 @@ final class Analyses {
         Optional.ofNullable(runs.remove(uri)).ifPresent(AnalysisRun::supersede);
     }
 
-    private AnalysisRun replace(Document document, CheckOptions options) {
-        AnalysisRun run = new AnalysisRun(document, options, gate.admit(document.uri()));
+    private AnalysisRun replace(Document document, RememberedSources sources) {
+        AnalysisRun run = new AnalysisRun(document, sources, gate.admit(document.uri()));
         Optional.ofNullable(runs.put(document.uri(), run)).ifPresent(AnalysisRun::supersede);
         return run;
     }
@@ -81,8 +103,10 @@ final class Analyses {
             return;
         }
         try {
-            FileReport report = analysis.check(run.document().source(), run.options(), run.budget());
-            List<org.eclipse.lsp4j.Diagnostic> diagnostics =
+            CheckOptions options =
+                    new CheckOptions(session.get().settings().group(), run.sources(), CheckOptions.DEFAULT_STEPS, true);
+            FileReport report = analysis.check(run.document().source(), options, run.budget());
+            List<Diagnostic> diagnostics =
                     new Diagnostics(run.document(), report, session.get().client()).list();
             if (!run.budget().isCancelled() && gate.publish(run.document(), run.ticket(), diagnostics)) {
                 run.report().complete(report);

@@ -1,8 +1,8 @@
 package irreproof.server;
 
 import irreproof.budget.Budget;
-import irreproof.check.CheckOptions;
 import irreproof.check.FileReport;
+import irreproof.workspace.RememberedSources;
 import java.util.concurrent.CompletableFuture;
 import java.util.concurrent.atomic.AtomicBoolean;
 
@@ -14,19 +14,24 @@ import java.util.concurrent.atomic.AtomicBoolean;
  */
 record AnalysisRun(
         Document document,
-        CheckOptions options,
+        RememberedSources sources,
         long ticket,
         Budget budget,
         CompletableFuture<FileReport> report,
         AtomicBoolean begun) {
 
-    AnalysisRun(Document document, CheckOptions options, long ticket) {
-        this(document, options, ticket, Budget.unlimited(), new CompletableFuture<>(), new AtomicBoolean());
+    AnalysisRun(Document document, RememberedSources sources, long ticket) {
+        this(document, sources, ticket, Budget.unlimited(), new CompletableFuture<>(), new AtomicBoolean());
     }
 
     /** True for exactly one caller. */
     boolean begin() {
         return begun.compareAndSet(false, true);
+    }
+
+    /** Whether the report could be another if that document had another text: if it took it, or still may. */
+    boolean dependsOn(Document other) {
+        return !report.isDone() || sources.took(other.source().path());
     }
 
     void supersede() {

@@ -1,7 +1,7 @@
 package irreproof.server;
 
-import irreproof.check.CheckOptions;
 import irreproof.server.transport.EditorClient;
+import java.util.List;
 import java.util.Optional;
 import java.util.function.Supplier;
 import org.eclipse.lsp4j.DidChangeTextDocumentParams;
@@ -22,6 +22,7 @@ final class DocumentService {
     private static final int LONGEST_DOCUMENT = 4 << 20;
 
     private final DocumentTable documents;
+    private final Project project;
     private final Analyses analyses;
     private final PublishGate gate;
     private final EditorClient client;
@@ -29,11 +30,13 @@ final class DocumentService {
 
     DocumentService(
             DocumentTable documents,
+            Project project,
             Analyses analyses,
             PublishGate gate,
             EditorClient client,
             Supplier<Session> session) {
         this.documents = documents;
+        this.project = project;
         this.analyses = analyses;
         this.gate = gate;
         this.client = client;
@@ -45,9 +48,11 @@ final class DocumentService {
         TextDocumentItem item = parameters.getTextDocument();
         Document document = Document.of(item.getUri(), item.getVersion(), item.getText());
         documents.put(document);
+        project.put(document);
         if (hasFairSize(document)) {
-            analyses.start(document, options());
+            analyses.start(document, project.sources(document));
         }
+        again(analyses.dependentsOnPresence(document));
     }
 
     @JsonNotification("textDocument/didChange")
@@ -62,11 +67,13 @@ final class DocumentService {
                 parameters.getContentChanges(),
                 session.get().client().encoding());
         int version = Optional.ofNullable(changed.getVersion()).orElse(before.version());
-        Document document = Document.of(before.uri(), version, text);
+        Document document = before.changed(version, text);
         documents.put(document);
+        project.put(document);
         if (hasFairSize(document)) {
-            analyses.startSoon(document, options());
+            analyses.startSoon(document, project.sources(document));
         }
+        again(analyses.dependents(document));
     }
 
     @JsonNotification("textDocument/didClose")
@@ -74,7 +81,13 @@ final class DocumentService {
         documents.remove(parameters.getTextDocument().getUri()).ifPresent(document -> {
             analyses.forget(document.uri());
             gate.close(document);
+            project.remove(document);
+            again(analyses.dependentsOnPresence(document));
         });
+    }
+
+    private void again(List<Document> dependents) {
+        dependents.forEach(document -> analyses.startSoon(document, project.sources(document)));
     }
 
     private boolean hasFairSize(Document document) {
@@ -86,10 +99,5 @@ final class DocumentService {
         client.logMessage(new MessageParams(
                 MessageType.Warning, document.source().path() + " is too large to be checked while it is edited"));
         return false;
-    }
-
-    private CheckOptions options() {
-        return new CheckOptions(
-                session.get().settings().group(), CheckOptions.plain().sources(), CheckOptions.DEFAULT_STEPS);
     }
 }

@@ -1,6 +1,7 @@
 package irreproof.server;
 
 import irreproof.server.transport.EditorClient;
+import irreproof.workspace.Version;
 import java.util.List;
 import java.util.concurrent.CompletableFuture;
 import java.util.function.Consumer;
@@ -48,7 +49,7 @@ final class LifeCycle {
                     .ifPresent(editor -> editor.onExit().thenRun(() -> end.accept(0)));
         }
         return CompletableFuture.completedFuture(
-                new InitializeResult(capabilities(profile), new ServerInfo("irreproof")));
+                new InitializeResult(capabilities(profile), new ServerInfo("irreproof", Version.text())));
     }
 
     @JsonRequest("shutdown")

@@ -64,7 +64,7 @@ public final class ServerMain {
         Analyses analyses = new Analyses(analysis, workers, gate, client, pause, session::get);
         return List.of(
                 new LifeCycle(client, session::set, exitCode::complete),
-                new DocumentService(new DocumentTable(), analyses, gate, client, session::get),
+                new DocumentService(new DocumentTable(), new Project(), analyses, gate, client, session::get),
                 new FeatureService(analyses, client, session::get));
     }
 }

@@ -3,8 +3,10 @@ package irreproof.server;
 import com.google.gson.JsonElement;
 import com.google.gson.JsonObject;
 import com.google.gson.JsonPrimitive;
+import irreproof.check.Checker;
 import java.util.ArrayList;
 import java.util.List;
+import java.util.Optional;
 
 /**
  * What the user may set in {@code initializationOptions}.
@@ -26,7 +28,10 @@ record Settings(String group, PositionEncoding positionEncoding, List<String> pr
             }
             return new Settings("", null, problems);
         }
-        String group = text(options, "group", problems);
+        String typed = text(options, "group", problems);
+        Optional<String> problem = Checker.problemWithGroup(typed);
+        problem.ifPresent(problems::add);
+        String group = problem.isPresent() ? "" : typed;
         String word = text(options, "positionEncoding", problems);
         PositionEncoding encoding = PositionEncoding.named(word).orElse(null);
         if (encoding == null && !word.isEmpty()) {

@@ -2,7 +2,9 @@ package irreproof.latex;
 
 import static org.junit.jupiter.api.Assertions.assertEquals;
 
+import irreproof.budget.Budget;
 import irreproof.text.MarkedText;
+import irreproof.text.SourceText;
 import irreproof.text.Span;
 import java.util.List;
 import java.util.stream.Stream;
@@ -78,15 +80,20 @@ final class DocumentTest {
     }
 
     @Test
-    void preamblesOfAChapter() {
-        LatexDocument document = Reader.read(
-                new irreproof.text.SourceText("chapter.tex", "$\\x$"),
-                List.of(new irreproof.text.SourceText("main.tex", "\\def\\x{8}\\begin{document}\\input{chapter}")),
-                (from, name) -> java.util.Optional.empty(),
-                irreproof.budget.Budget.unlimited());
+    void aChapterUsesWhatItsDocumentDefinesBefore() {
+        SourceText chapter = new SourceText("chapter.tex", "$\\x\\y\\z\\w$");
+        SourceText root = new SourceText(
+                "main.tex",
+                "\\def\\x{8}\\begin{document}\\input{macros}\\include{other}\\include{chapter}\\def\\z{10}\\end{document}");
+        SourceText macros = new SourceText("macros", "\\def\\y{3}");
+        SourceText other = new SourceText("other", "\\def\\w{6}");
+        SourceProvider sources = (from, name) -> Stream.of(macros, other, chapter)
+                .filter(file -> file.path().equals(name) || file.path().equals(name + ".tex"))
+                .findFirst();
+        LatexDocument document = Reader.read(chapter, List.of(root), sources, Budget.unlimited());
         assertEquals(
-                List.of("8"),
-                Stream.of(document.passages().get(0)).map(Manuscript::show).toList());
+                List.of("83\\z\\w"),
+                document.passages().stream().map(Manuscript::show).toList());
     }
 
     @Test

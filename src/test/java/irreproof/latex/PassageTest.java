@@ -63,6 +63,28 @@ final class PassageTest {
     }
 
     @Test
+    void whatCannotStandInAFormulaEndsIt() {
+        passages("$3 \\text{if\n\n$8$", "3 \\text{if", "8");
+        passages("\\footnote{on $3} and $8$", "3", "8");
+        passages("\\begin{theorem} $3 \\end{theorem} $8$", "3", "8");
+        passages("\\begin{itemize}\\item $3 \\item $8$\\end{itemize}", "3", "8");
+        passages("\\begin{align} 3 \\section{On $8$}", "3", "8");
+        passages("$3}$ $8$", "3", "8");
+        passages("$a$$b$", "a", "b");
+    }
+
+    @Test
+    void tablesKeepTheirFormulasInTheirCells() {
+        passages("\\begin{tabular}{c} $3 & of $8$ \\\\ \\ensuremath{10} & x\\end{tabular}", "3 & 8 // 10 & ");
+        passages("\\begin{tabular}{c} $8$ \n\n x \\section{On $3$}", "8", "3");
+    }
+
+    @Test
+    void textInFormulasMayHoldFormulas() {
+        passages("\\[ 3 \\text{ for $x$ or \\mbox{$y$}} 8 \\]", "3 \\text{ for x or \\mbox{y}} 8");
+    }
+
+    @Test
     void intertextSplitsRows() {
         passages("\\begin{align} a&=b \\intertext{and $x$} c&=d \\end{align}", "a & =b // c & =d");
     }

@@ -23,6 +23,10 @@ final class ProseTest {
                 "\\newcommand{\\SU}[1]{\\ensuremath{\\mathrm{SU}( #1 )}}the \\SU{3} group | the SU(3) group",
                 "\\def\\SU{\\mathrm{SU}}the $\\SU(3)$ group | the SU(3) group",
                 "$\\mathcal{N}=8$ | N=8",
+                "$SU(3)_\\mathrm{fl}$ | SU(3)_{fl}",
+                "$SO(10)\\xrightarrow{M_X}SU(5)\\overset{a}{\\to}SL(2,\\C)$ | SO(10)→SU(5)→SL(2,C)",
+                "a\\\\ [SU(3)]\\\\[2pt] b \\linebreak[3] c | a [SU(3)] b c",
+                "\\item[SU(3)] x | [SU(3)] x",
                 "see \\cite[p.~3]{abc} there | see there",
             })
     void flattened(String latex, String expected) {

@@ -10,6 +10,7 @@ import irreproof.text.SourceText;
 import irreproof.text.Span;
 import java.time.Duration;
 import java.util.List;
+import java.util.Optional;
 import java.util.Random;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.params.ParameterizedTest;
@@ -39,7 +40,7 @@ final class RobustnessTest {
             """;
 
     private static LatexDocument read(String text) {
-        SourceProvider sources = (from, name) -> java.util.Optional.empty();
+        SourceProvider sources = (from, name) -> Optional.empty();
         LatexDocument document = Reader.read(new SourceText("x.tex", text), sources, Budget.unlimited());
         for (Passage passage : document.passages()) {
             assertInside(passage.span(), text);
@@ -164,7 +165,12 @@ final class RobustnessTest {
                 "\\x ",
                 "\\begin{e}",
                 "\\cite[",
-                "\\verb|"
+                "\\verb|",
+                "\\url{",
+                "\\gdef\\x{}{",
+                "\\csname a",
+                "\\ifx",
+                "\\@ifstar{"
             })
     void deepOrLong(String piece) {
         String head = "\\newcommand{\\rep}[2][]{#1#2}\\newenvironment{e}{\\begin{align}}{\\end{align}}";

@@ -60,20 +60,21 @@ final class DimensionSums {
                 "the dimensions differ",
                 List.of("left " + left + ", right " + right),
                 List.of(new Fix("Replace by " + correct, true, List.of(new TextEdit(last, correct)))));
+        Matcher group = GROUP.matcher(text);
+        boolean named = group.find();
+        String setting = named ? group.group(1) : defaultGroup;
         List<Card> cards = new ArrayList<>();
-        cards.add(new Card(whole, text.substring(match.start(1), match.end(2)), List.of()));
+        cards.add(new Card(whole, match.group(), List.of(new Card.Row("group", setting))));
         NUMBER.matcher(match.group())
                 .results()
                 .forEach(number -> cards.add(new Card(
                         new Span(match.start() + number.start(), match.start() + number.end()),
                         number.group() + "'",
-                        List.of(new Card.Row("Dimension", number.group())))));
-        Matcher group = GROUP.matcher(text);
-        boolean named = group.find();
+                        List.of(new Card.Row("dimension", number.group())))));
         return new StatementReport(
                 new Statement(List.of(), List.of(), whole, match.group(), List.of()),
                 StatementKind.PRODUCT,
-                named ? group.group(1) : defaultGroup,
+                setting,
                 named ? SettingSource.PROSE : SettingSource.PROJECT,
                 named ? new Span(group.start(1), group.end(1)) : null,
                 left == right ? Verdict.HOLDS : Verdict.FAILS,

@@ -6,6 +6,7 @@ import static org.junit.jupiter.api.Assertions.assertThrows;
 import static org.junit.jupiter.api.Assertions.assertTrue;
 
 import irreproof.Tools;
+import irreproof.workspace.Version;
 import java.io.IOException;
 import org.eclipse.lsp4j.InitializeResult;
 import org.eclipse.lsp4j.ServerCapabilities;
@@ -29,6 +30,7 @@ class LifeCycleTest {
         try (Editor editor = Editor.fresh()) {
             InitializeResult result = editor.initialize("{}");
             assertEquals("irreproof", result.getServerInfo().getName());
+            assertEquals(Version.text(), result.getServerInfo().getVersion());
             ServerCapabilities can = result.getCapabilities();
             assertEquals(
                     TextDocumentSyncKind.Incremental,

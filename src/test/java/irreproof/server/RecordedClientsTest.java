@@ -65,7 +65,7 @@ class RecordedClientsTest {
             boolean markdown = array(capabilities, "textDocument", "hover", "contentFormat")
                     .toString()
                     .contains("markdown");
-            assertEquals(markdown ? "**2'**\n\n- Dimension: 2" : "2'\n\nDimension: 2", editor.hover(0, 0));
+            assertEquals(markdown ? "**2'**\n\n- dimension: 2" : "2'\n\ndimension: 2", editor.hover(0, 0));
             CodeAction action = editor.codeActions(
                             published.getDiagnostics().get(0).getRange(),
                             new CodeActionContext(published.getDiagnostics()))
