@@ -86,7 +86,7 @@ class ManuscriptTest {
             editor.open("In SU(3) $\\mathbf{3}\\otimes\\mathbf{8} = \\overline{\\mathbf{6}}$");
             String octet = editor.hover(0, 33);
             for (String fact : List.of(
-                    "of SU(3)**",
+                    "of SU(3)",
                     "- dimension: 8",
                     "- Dynkin label: (1,1)",
                     "- reality: real",
