@@ -5,7 +5,9 @@ import java.util.Set;
 
 /**
  * Resolves TeX's conditionals as far as they can be known here: {@code \iftrue}, {@code \iffalse}, {@code \newif}
- * switches, {@code \ifmmode}, {@code \ifx}, {@code \ifnum} of plain numbers. Of any other both branches are read in prose; in mathematics it spoils the passage.
+ * switches, {@code \ifmmode}, {@code \ifx}, {@code \ifnum} of plain numbers. Of
+ * any other the first branch is read in prose; in mathematics it spoils the passage. Of what is not known as a conditional
+ * (a class file's own switch) both branches are read.
  */
 final class Conditionals {
     private static final Set<String> PRIMITIVES = Set.of(
@@ -28,10 +30,18 @@ final class Conditionals {
             "ifeof",
             "ifdefined",
             "ifcsname",
-            "iffontchar");
+            "iffontchar",
+            "ifpdf",
+            "ifxetex",
+            "ifluatex",
+            "ifPDFTeX",
+            "ifXeTeX",
+            "ifLuaTeX");
 
     private final Expander expander;
     private final MacroTable macros;
+    /** Branches being read whose end has not come yet; without any, an {@code \\else} belongs to nothing known. */
+    private int openBranches;
 
     Conditionals(Expander expander) {
         this.expander = expander;
@@ -46,10 +56,13 @@ final class Conditionals {
                 declare();
                 return true;
             case "else", "or":
-                // reached only at the end of a branch that was taken
-                skip(false);
+                if (openBranches > 0) {
+                    openBranches--;
+                    skip(word, false);
+                }
                 return true;
             case "fi":
+                openBranches = Math.max(0, openBranches - 1);
                 return true;
             default:
                 break;
@@ -87,20 +100,20 @@ final class Conditionals {
     private void decide(Token word) {
         String name = word.text();
         Boolean value = switch (name) {
-            case "iftrue" -> Boolean.TRUE;
-            case "iffalse" -> Boolean.FALSE;
+            case "iftrue", "ifpdf", "ifPDFTeX" -> Boolean.TRUE;
+            case "iffalse", "ifxetex", "ifluatex", "ifXeTeX", "ifLuaTeX" -> Boolean.FALSE;
             case "ifmmode" -> expander.isMathMode();
             case "ifx" -> sameMeaning(expander.raw(), expander.raw());
             case "ifdefined" -> isDefined(expander.raw());
             case "ifnum" -> compare();
             default -> macros.switchState(name.substring(2));
         };
-        if (value == null) {
-            if (expander.isMathMode()) {
-                expander.fail("\\" + name + " in a formula cannot be decided", word.span());
-            }
-        } else if (!value) {
-            skip(true);
+        if (value == null && expander.isMathMode()) {
+            expander.fail("\\" + name + " in a formula cannot be decided", word.span());
+        } else if (Boolean.FALSE.equals(value)) {
+            skip(word, true);
+        } else {
+            openBranches++;
         }
     }
 
@@ -165,22 +178,22 @@ final class Conditionals {
         return value;
     }
 
-    /** Skips to the matching {@code \fi}, or behind the matching {@code \else}. */
-    private void skip(boolean stopAtElse) {
+    /** Skips to the matching {@code \fi}, or behind the matching {@code \else}, whose branch is then open. */
+    private void skip(Token from, boolean stopAtElse) {
         int depth = 0;
-        while (true) {
-            Token token = expander.raw();
-            if (token == null) {
-                return;
-            }
+        for (Token token = expander.raw(); token != null; token = expander.raw()) {
             if (token.kind() != TokenKind.CONTROL_WORD) {
                 continue;
             }
             if (isConditional(token.text())) {
                 depth++;
-            } else if (token.isWord("fi") && depth-- == 0 || stopAtElse && depth == 0 && token.isWord("else")) {
+            } else if (token.isWord("fi") && depth-- == 0) {
+                return;
+            } else if (stopAtElse && depth == 0 && token.isWord("else")) {
+                openBranches++;
                 return;
             }
         }
+        expander.report("\\" + from.text() + " has no \\fi; the rest is not read");
     }
 }

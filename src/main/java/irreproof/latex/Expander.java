@@ -147,6 +147,10 @@ final class Expander {
         shared.report(problem);
     }
 
+    void report(String problem) {
+        shared.report(problem);
+    }
+
     /** Nothing more is read of this source. */
     void stop() {
         waiting.clear();

@@ -3,6 +3,7 @@ package irreproof.latex;
 import irreproof.text.Span;
 import java.util.ArrayDeque;
 import java.util.ArrayList;
+import java.util.BitSet;
 import java.util.Deque;
 import java.util.List;
 import java.util.Set;
@@ -25,6 +26,9 @@ final class PassageReader {
     private final TextGroups groups = new TextGroups();
     private int groupsBefore;
     private boolean shifted;
+    /** The columns of a table set as mathematics, or null if this is no table. */
+    private BitSet mathematicalColumns;
+
     private Span span;
     private boolean closed;
 
@@ -44,7 +48,8 @@ final class PassageReader {
         mathMode(!table);
         if (!isShift()) {
             environments.push(environment);
-            skipArguments(environment, false);
+            BitSet columns = TableColumns.mathematical(skipArguments(environment, false));
+            mathematicalColumns = table ? columns : null;
         }
         Token token = expander.next();
         while (token != null && accept(token)) {
@@ -57,7 +62,7 @@ final class PassageReader {
         if (expander.takeFailure() || tokens.isEmpty()) {
             return null;
         }
-        List<Row> rows = RowSplitter.split(tokens, table);
+        List<Row> rows = RowSplitter.split(tokens, mathematicalColumns);
         return rows.isEmpty() ? null : new Passage(layout(), environment, rows, span);
     }
 
@@ -288,15 +293,18 @@ final class PassageReader {
         tokens.add(token);
     }
 
-    private void skipArguments(String name, boolean keep) {
+    /** Reads the environment's arguments; returns the last one. */
+    private List<Token> skipArguments(String name, boolean keep) {
+        List<Token> last = List.of();
         for (char kind : MathEnvironments.arguments(name).toCharArray()) {
-            boolean found = (kind == 'o'
-                            ? expander.arguments().optional()
-                            : expander.arguments().mandatory())
-                    != null;
-            if (found && keep) {
+            List<Token> argument = kind == 'o'
+                    ? expander.arguments().optional()
+                    : expander.arguments().mandatory();
+            if (argument != null && keep) {
                 expander.arguments().lastTaken().forEach(this::silently);
             }
+            last = argument == null ? last : argument;
         }
+        return last;
     }
 }

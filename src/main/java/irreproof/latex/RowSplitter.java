@@ -2,6 +2,7 @@ package irreproof.latex;
 
 import irreproof.text.Span;
 import java.util.ArrayList;
+import java.util.BitSet;
 import java.util.List;
 import java.util.Set;
 
@@ -15,26 +16,16 @@ final class RowSplitter {
     private static final Set<String> ROW_ENDS = Set.of("cr", "tabularnewline");
     private static final Set<String> MARGINALIA = Set.of("label", "tag", "nonumber", "notag", "hline", "displaystyle");
 
-    private final boolean table;
-    private final List<Row> rows = new ArrayList<>();
-    private List<Cell> cells = new ArrayList<>();
+    private static final Set<String> RULES =
+            Set.of("hline", "toprule", "midrule", "bottomrule", "endhead", "endfirsthead", "endfoot", "endlastfoot");
 
-    private RowSplitter(boolean table) {
-        this.table = table;
-    }
+    /** Counts the groups and environments that are open. */
+    private static final class Nesting {
+        private int groups;
+        private int environments;
 
-    static List<Row> split(List<Token> tokens, boolean table) {
-        RowSplitter splitter = new RowSplitter(table);
-        splitter.rows(tokens, 0);
-        return splitter.rows;
-    }
-
-    private void rows(List<Token> tokens, int level) {
-        int groups = 0;
-        int environments = 0;
-        int rowStart = 0;
-        for (int i = 0; i < tokens.size(); i++) {
-            Token token = tokens.get(i);
+        /** Takes the next token; true if it stands outside all groups and environments and opens none. */
+        boolean isOutside(Token token) {
             if (token.kind() == TokenKind.BEGIN_GROUP) {
                 groups++;
             } else if (token.kind() == TokenKind.END_GROUP) {
@@ -43,7 +34,35 @@ final class RowSplitter {
                 environments++;
             } else if (token.isWord("end")) {
                 environments = Math.max(0, environments - 1);
-            } else if (groups == 0 && environments == 0 && endsRow(token)) {
+            } else {
+                return groups == 0 && environments == 0;
+            }
+            return false;
+        }
+    }
+
+    private final boolean table;
+    private final BitSet mathematicalColumns;
+    private final List<Row> rows = new ArrayList<>();
+    private List<Cell> cells = new ArrayList<>();
+
+    private RowSplitter(BitSet mathematicalColumns) {
+        this.table = mathematicalColumns != null;
+        this.mathematicalColumns = mathematicalColumns;
+    }
+
+    /** @param mathematicalColumns the columns of a table whose cells are mathematics as they stand; null if no table */
+    static List<Row> split(List<Token> tokens, BitSet mathematicalColumns) {
+        RowSplitter splitter = new RowSplitter(mathematicalColumns);
+        splitter.rows(tokens, 0);
+        return splitter.rows;
+    }
+
+    private void rows(List<Token> tokens, int level) {
+        Nesting nesting = new Nesting();
+        int rowStart = 0;
+        for (int i = 0; i < tokens.size(); i++) {
+            if (nesting.isOutside(tokens.get(i)) && endsRow(tokens.get(i))) {
                 row(tokens.subList(rowStart, i), level);
                 rowStart = behindRowEnd(tokens, i);
                 i = rowStart - 1;
@@ -105,20 +124,11 @@ final class RowSplitter {
             rows(inner, level + 1);
             return;
         }
-        int groups = 0;
-        int environments = 0;
+        Nesting nesting = new Nesting();
         int cellStart = 0;
         for (int i = 0; i < tokens.size(); i++) {
             Token token = tokens.get(i);
-            if (token.kind() == TokenKind.BEGIN_GROUP) {
-                groups++;
-            } else if (token.kind() == TokenKind.END_GROUP) {
-                groups = Math.max(0, groups - 1);
-            } else if (token.isWord("begin")) {
-                environments++;
-            } else if (token.isWord("end")) {
-                environments = Math.max(0, environments - 1);
-            } else if (groups == 0 && environments == 0 && token.kind() == TokenKind.ALIGN) {
+            if (nesting.isOutside(token) && token.kind() == TokenKind.ALIGN) {
                 cell(tokens.subList(cellStart, i), token.span().start());
                 cellStart = i + 1;
             }
@@ -132,7 +142,7 @@ final class RowSplitter {
     }
 
     private void cell(List<Token> tokens, int emptyAt) {
-        List<Token> kept = table ? mathematics(tokens) : new ArrayList<>(tokens);
+        List<Token> kept = table ? ofTable(tokens) : new ArrayList<>(tokens);
         kept.removeIf(token -> token.kind() == TokenKind.INLINE_SHIFT || token.kind() == TokenKind.DISPLAY_SHIFT);
         int from = 0;
         int to = kept.size();
@@ -151,6 +161,20 @@ final class RowSplitter {
             span = span.cover(token.span());
         }
         cells.add(new Cell(kept.subList(from, to), span));
+    }
+
+    /** The mathematics of a table's cell. */
+    private List<Token> ofTable(List<Token> tokens) {
+        boolean plain = tokens.stream()
+                .noneMatch(token -> token.kind() == TokenKind.INLINE_SHIFT
+                        || token.kind() == TokenKind.DISPLAY_SHIFT
+                        || token.isWord("multicolumn"));
+        if (!plain || !mathematicalColumns.get(cells.size())) {
+            return mathematics(tokens);
+        }
+        List<Token> kept = new ArrayList<>(tokens);
+        kept.removeIf(token -> token.kind() == TokenKind.CONTROL_WORD && RULES.contains(token.text()));
+        return kept;
     }
 
     /** What stands between math shifts. */

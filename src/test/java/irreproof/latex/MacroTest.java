@@ -51,6 +51,7 @@ final class MacroTest {
                 "\\def\\x{\\@ifstar{\\y}{\\z}}\\makeatletter\\def\\x{\\@ifstar{\\y}{\\z}}\\makeatother \\def\\y{8}\\def\\z{9} $\\x*\\x$ | 89",
                 "\\newif\\iffull \\def\\x{\\iffull 1\\else 2\\fi} \\fulltrue $\\x\\fullfalse\\x$ | 12",
                 "\\iffalse $1$ \\iftrue\\fi \\else $2$ \\fi | 2",
+                "\\iffalse $1$\\ifpdf $2$\\else $3$\\fi $4$\\fi $5$ | 5",
                 "\\newcommand{\\x}[1]{\\ifnum#1=1 a\\else b\\fi} $\\x{1}\\x{2}$ | ab",
             })
     void expands(String latex, String expected) {
@@ -96,6 +97,22 @@ final class MacroTest {
         Manuscript manuscript = Manuscript.of("$1$ $2\\ifodd\\count 3\\else4\\fi$ $5$");
         assertEquals(List.of("1", "5"), manuscript.passages());
         assertEquals(1, manuscript.document().problems().size());
+    }
+
+    @Test
+    void bothBranchesOfAnUnknownSwitchAreRead() {
+        assertEquals(
+                List.of("1", "2", "3"),
+                Manuscript.of("\\ifclassswitch $1$\\else $2$\\fi $3$").passages());
+    }
+
+    @Test
+    void aConditionalWithoutEndIsAProblem() {
+        Manuscript manuscript = Manuscript.of("$1$ \\iffalse $2$");
+        assertEquals(List.of("1"), manuscript.passages());
+        assertEquals(
+                List.of("\\iffalse has no \\fi; the rest is not read"),
+                manuscript.document().problems());
     }
 
     @Test

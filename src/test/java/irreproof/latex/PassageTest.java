@@ -76,6 +76,10 @@ final class PassageTest {
     @Test
     void tablesKeepTheirFormulasInTheirCells() {
         passages("\\begin{tabular}{c} $3 & of $8$ \\\\ \\ensuremath{10} & x\\end{tabular}", "3 & 8 // 10 & ");
+        passages(
+                "\\begin{tabular}{l>{\\small$}c<{$}*{2}{|>{$}p{1cm}<{$}|}c}\\hline a & 3 & 8\\times8 & $1$ & x \\\\ \\hline & &"
+                        + " \\multicolumn{2}{c}{b} \\end{tabular}",
+                " & 3 & 8\\times8 & 1 & ");
         passages("\\begin{tabular}{c} $8$ \n\n x \\section{On $3$}", "8", "3");
     }
 
