@@ -42,6 +42,9 @@ final class Choices {
                 String name = arguments.name();
                 branch(name != null && expander.macros().find(name) == null, true, true);
                 return true;
+            case "texorpdfstring":
+                branch(true, true, true);
+                return true;
             case "ifthenelse":
                 return equality(word);
             default:

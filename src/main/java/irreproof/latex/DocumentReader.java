@@ -22,7 +22,7 @@ final class DocumentReader {
 
     private final SourceText source;
     private final Expander expander;
-    private final Expander.Shared shared;
+    private final Reading reading;
     private final Inclusions inclusions;
     private final Flattener prose = new Flattener();
     private final List<Passage> passages = new ArrayList<>();
@@ -36,11 +36,11 @@ final class DocumentReader {
     private boolean preamble;
     private boolean ended;
 
-    DocumentReader(SourceText source, Expander.Shared shared, Inclusions inclusions) {
+    DocumentReader(SourceText source, Reading reading, Inclusions inclusions) {
         this.source = source;
-        this.shared = shared;
+        this.reading = reading;
         this.inclusions = inclusions;
-        this.expander = new Expander(source.path(), source.content(), shared, inclusions);
+        this.expander = new Expander(source.path(), source.content(), reading, inclusions);
         this.preamble = Preamble.opens(source.content());
     }
 
@@ -59,8 +59,8 @@ final class DocumentReader {
                 paragraphs,
                 expander.comments(),
                 prose.result(),
-                shared.macros,
-                shared.problems());
+                reading.macros(),
+                reading.problems());
     }
 
     /** The whole source as one inline formula, or its first passage if it has math shifts or environments of its own. */
@@ -101,13 +101,13 @@ final class DocumentReader {
             }
             case BEGIN_GROUP -> {
                 if (!preamble) {
-                    shared.macros.openGroup();
+                    reading.macros().openGroup();
                 }
                 show(token);
             }
             case END_GROUP -> {
                 if (!preamble) {
-                    shared.macros.closeGroup();
+                    reading.macros().closeGroup();
                 }
                 show(token);
             }
@@ -163,12 +163,12 @@ final class DocumentReader {
             }
             case "bgroup", "begingroup" -> {
                 if (!preamble) {
-                    shared.macros.openGroup();
+                    reading.macros().openGroup();
                 }
             }
             case "egroup", "endgroup" -> {
                 if (!preamble) {
-                    shared.macros.closeGroup();
+                    reading.macros().closeGroup();
                 }
             }
             case "footnote", "caption", "footnotetext" -> {
@@ -220,7 +220,7 @@ final class DocumentReader {
             passage(token.at(span), name);
             return;
         }
-        shared.macros.openGroup();
+        reading.macros().openGroup();
         for (char kind : MathEnvironments.arguments(name).toCharArray()) {
             if (kind == 'o') {
                 expander.arguments().optional();
@@ -236,7 +236,7 @@ final class DocumentReader {
         if ("document".equals(name)) {
             ended = true;
         } else if (!preamble) {
-            shared.macros.closeGroup();
+            reading.macros().closeGroup();
         }
     }
 
@@ -263,7 +263,7 @@ final class DocumentReader {
             prose.blank(reader.span());
         }
         if (!reader.isClosed()) {
-            shared.report("the formula that begins in line "
+            reading.report("the formula that begins in line "
                     + (source.lines().position(opener.span().start()).line() + 1) + " does not end");
         }
         if (passage != null) {

@@ -1,11 +1,9 @@
 package irreproof.latex;
 
-import irreproof.budget.Budget;
 import irreproof.text.Span;
 import java.util.ArrayDeque;
 import java.util.ArrayList;
 import java.util.Deque;
-import java.util.LinkedHashSet;
 import java.util.List;
 import java.util.Set;
 
@@ -20,8 +18,6 @@ import java.util.Set;
 final class Expander {
     private static final int EXPANSIONS_PER_CALL = 20_000;
     private static final int TOKENS_PER_CALL = 400_000;
-    private static final int COST_OF_EXPANSION = 4;
-    private static final int MOST_PROBLEMS = 100;
 
     /** Commands whose redefinition changes how they look, not what they are to us. */
     private static final Set<String> STRUCTURE = Set.of(
@@ -46,30 +42,8 @@ final class Expander {
         }
     }
 
-    /** What all expanders of one document have in common. */
-    static final class Shared {
-        final MacroTable macros = new MacroTable();
-        private final Set<String> problems = new LinkedHashSet<>();
-        final Budget budget;
-        private long tokensLeft = 20_000_000;
-
-        Shared(Budget budget) {
-            this.budget = budget;
-        }
-
-        void report(String problem) {
-            if (problems.size() < MOST_PROBLEMS) {
-                problems.add(problem);
-            }
-        }
-
-        List<String> problems() {
-            return List.copyOf(problems);
-        }
-    }
-
     private final Lexer lexer;
-    private final Shared shared;
+    private final Reading reading;
     private final String path;
     private final Deque<Waiting> waiting = new ArrayDeque<>();
     private final List<Comment> comments = new ArrayList<>();
@@ -84,10 +58,10 @@ final class Expander {
     private int expansions;
     private int produced;
 
-    Expander(String path, String content, Shared shared, Inclusions inclusions) {
+    Expander(String path, String content, Reading reading, Inclusions inclusions) {
         this.path = path;
         this.lexer = new Lexer(content);
-        this.shared = shared;
+        this.reading = reading;
         this.inclusions = inclusions;
         definitions = new Definitions(this);
         conditionals = new Conditionals(this);
@@ -108,7 +82,7 @@ final class Expander {
     }
 
     MacroTable macros() {
-        return shared.macros;
+        return reading.macros();
     }
 
     /** The comments met so far. */
@@ -144,11 +118,11 @@ final class Expander {
         }
         waiting.clear();
         push(behind);
-        shared.report(problem);
+        reading.report(problem);
     }
 
     void report(String problem) {
-        shared.report(problem);
+        reading.report(problem);
     }
 
     /** Nothing more is read of this source. */
@@ -164,7 +138,8 @@ final class Expander {
             if (token == null || token.kind() != TokenKind.CONTROL_WORD && token.kind() != TokenKind.CONTROL_SYMBOL) {
                 return token;
             }
-            Macro macro = STRUCTURE.contains(token.text()) ? null : shared.macros.find(token.text());
+            Macro macro =
+                    STRUCTURE.contains(token.text()) ? null : reading.macros().find(token.text());
             if (macro != null && macro.expandable()) {
                 if (!expand(token, macro)) {
                     return token;
@@ -242,9 +217,8 @@ final class Expander {
         }
         expansions++;
         produced += result.size();
-        shared.tokensLeft -= result.size() + COST_OF_EXPANSION;
-        shared.budget.spend(result.size());
-        if (expansions > EXPANSIONS_PER_CALL || produced > TOKENS_PER_CALL || shared.tokensLeft < 0) {
+        reading.expanded(result.size());
+        if (expansions > EXPANSIONS_PER_CALL || produced > TOKENS_PER_CALL || reading.isExhausted()) {
             fail("\\" + word.text() + " expands without end", call.span());
             return;
         }
@@ -272,7 +246,7 @@ final class Expander {
 
     /** The next token as it stands, comments left out, or null at the end. */
     Token raw() {
-        shared.budget.spend(1);
+        reading.budget().spend(1);
         Waiting top = waiting.peek();
         if (top != null) {
             Token token = top.tokens.get(top.position++);

@@ -44,6 +44,9 @@ final class Flattener {
                 if (spaceNext && Character.isLetterOrDigit(token.text().charAt(0))) {
                     blank(token.span());
                 }
+                if (token.isCharacter(')')) {
+                    dropBlank();
+                }
                 append(token.text(), token.span());
             }
             case SPACE -> {
@@ -171,11 +174,20 @@ final class Flattener {
         return false;
     }
 
-    /** One blank, unless a blank or line feed stands there already. */
+    /** One blank, unless a blank, a line feed or an opening parenthesis stands there already. */
     void blank(Span span) {
         int length = text.length();
-        if (length > 0 && text.charAt(length - 1) != ' ' && text.charAt(length - 1) != '\n') {
+        char last = length == 0 ? ' ' : text.charAt(length - 1);
+        if (last != ' ' && last != '\n' && last != '(') {
             append(" ", span);
+        }
+    }
+
+    /** A macro for {@code SU( #1 )}, made for formulas, is used in prose too. */
+    private void dropBlank() {
+        int length = text.length();
+        if (length > 0 && text.charAt(length - 1) == ' ') {
+            text.setLength(length - 1);
         }
     }
 

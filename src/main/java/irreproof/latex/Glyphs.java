@@ -67,7 +67,7 @@ final class Glyphs {
                 "label ref eqref cref Cref autoref pageref nameref hypertarget bibliography bibliographystyle "
                         + "pagestyle thispagestyle vskip phantom hphantom vphantom graphicspath setcounter color index "
                         + "tikzset newtheorem theoremstyle newcounter affiliation email pacs preprint vspace hspace "
-                        + "bibitem tag");
+                        + "bibitem tag ytableausetup");
         unseen(
                 "om",
                 "xrightarrow xleftarrow cite citep citet citealp parencite textcite footcite autocite includegraphics usetikzlibrary");

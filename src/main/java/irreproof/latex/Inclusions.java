@@ -14,7 +14,7 @@ final class Inclusions {
     private static final int MOST = 500;
 
     private final SourceProvider sources;
-    private final Expander.Shared shared;
+    private final Reading common;
     private final String main;
     private final Set<String> reading = new HashSet<>();
     private final Set<String> packages = new HashSet<>();
@@ -25,10 +25,10 @@ final class Inclusions {
     private boolean reachedMain;
 
     /** @param main the path of the document that is read; a file that includes it does not make it read twice */
-    Inclusions(String main, SourceProvider sources, Expander.Shared shared) {
+    Inclusions(String main, SourceProvider sources, Reading common) {
         this.main = main;
         this.sources = sources;
-        this.shared = shared;
+        this.common = common;
     }
 
     /** True if the word was an including command; it and its arguments are then used up. */
@@ -118,12 +118,12 @@ final class Inclusions {
             return;
         }
         if (reading.size() >= DEEPEST || files >= MOST) {
-            shared.report("too many files are included; " + file.path() + " is left out");
+            common.report("too many files are included; " + file.path() + " is left out");
             return;
         }
         files++;
         reading.add(file.path());
-        Expander expander = new Expander(file.path(), file.content(), shared, this);
+        Expander expander = new Expander(file.path(), file.content(), common, this);
         expander.lexer().atIsLetter(atIsLetter);
         while (expander.next() != null) {
             // only what the file defines matters here
@@ -138,7 +138,7 @@ final class Inclusions {
     void readRoot(SourceText root) {
         reading.add(root.path());
         reachedMain = root.path().equals(main);
-        Expander expander = new Expander(root.path(), root.content(), shared, this);
+        Expander expander = new Expander(root.path(), root.content(), common, this);
         while (!reachedMain) {
             Token token = expander.next();
             if (token == null

@@ -31,8 +31,8 @@ public final class Reader {
     }
 
     private static DocumentReader reader(SourceText source, SourceProvider sources, Budget budget) {
-        Expander.Shared shared = new Expander.Shared(budget);
-        return new DocumentReader(source, shared, new Inclusions(source.path(), sources, shared));
+        Reading reading = new Reading(budget);
+        return new DocumentReader(source, reading, new Inclusions(source.path(), sources, reading));
     }
 
     /** A snippet typed on the command line or in a directive, flattened; spans refer to the snippet. */

@@ -29,6 +29,7 @@ final class TextGroups {
             "tag",
             "parbox",
             "raisebox",
+            "colorbox",
             "textcolor");
 
     private final BitSet holdsText = new BitSet();
@@ -37,18 +38,23 @@ final class TextGroups {
 
     /** Takes note of a token; called for every one, in order. */
     void accept(Token token) {
+        boolean furtherArgument = false;
         switch (token.kind()) {
             case BEGIN_GROUP -> {
                 holdsText.set(depth, commandBefore || inText());
                 depth++;
             }
-            case END_GROUP -> depth = Math.max(0, depth - 1);
+            case END_GROUP -> {
+                boolean text = inText();
+                depth = Math.max(0, depth - 1);
+                furtherArgument = text && !inText();
+            }
             default -> {
                 // changes no group
             }
         }
         boolean command = token.kind() == TokenKind.CONTROL_WORD && COMMANDS.contains(token.text());
-        commandBefore = command || commandBefore && token.kind() == TokenKind.SPACE;
+        commandBefore = command || furtherArgument || commandBefore && token.kind() == TokenKind.SPACE;
     }
 
     int depth() {

@@ -86,6 +86,7 @@ final class PassageTest {
     @Test
     void textInFormulasMayHoldFormulas() {
         passages("\\[ 3 \\text{ for $x$ or \\mbox{$y$}} 8 \\]", "3 \\text{ for x or \\mbox{y}} 8");
+        passages("$3\\raisebox{1ex}{ $x$ }8$", "3\\raisebox{1ex}{ x }8");
     }
 
     @Test

@@ -27,6 +27,8 @@ final class ProseTest {
                 "$SO(10)\\xrightarrow{M_X}SU(5)\\overset{a}{\\to}SL(2,\\C)$ | SO(10)→SU(5)→SL(2,C)",
                 "a\\\\ [SU(3)]\\\\[2pt] b \\linebreak[3] c | a [SU(3)] b c",
                 "\\item[SU(3)] x | [SU(3)] x",
+                "\\newcommand\\SU[1]{\\mathrm{SU}( #1 )}\\emph{of \\SU{3} now} | of SU(3) now",
+                "\\section{\\texorpdfstring{$E_6$}{E6}} | E_6",
                 "see \\cite[p.~3]{abc} there | see there",
             })
     void flattened(String latex, String expected) {
