@@ -16,6 +16,7 @@ import irreproof.notation.Relation;
 import irreproof.notation.Statement;
 import java.math.BigInteger;
 import java.util.ArrayList;
+import java.util.Comparator;
 import java.util.List;
 import java.util.Optional;
 
@@ -79,8 +80,10 @@ final class Arbiter {
                 return holds(trial, trials, unsupported);
             }
         }
-        Optional<Trial> failed =
-                trials.stream().filter(trial -> trial.is(Outcome.FAILS)).findFirst();
+        Optional<Trial> failed = trials.stream()
+                .filter(trial -> trial.is(Outcome.FAILS))
+                .min(Comparator.comparing((Trial trial) -> trial.setting().near())
+                        .thenComparingLong(trial -> trial.judgement().distance()));
         if (failed.isPresent()) {
             return fails(statement, failed.get(), unsupported);
         }

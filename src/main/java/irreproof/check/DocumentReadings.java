@@ -27,7 +27,19 @@ final class DocumentReadings {
     static final String UNUSUAL = "unusual-name";
     static final String CONFLICT = "conflicting-readings";
 
-    private record Key(LieGroup group, NameKey name) {}
+    private record Key(LieGroup group, NameKey name) {
+        // equals and hashCode written out: a record's generated ones cost a short run more than the rest of its work
+
+        @Override
+        public boolean equals(Object other) {
+            return other instanceof Key that && name.equals(that.name) && group.equals(that.group);
+        }
+
+        @Override
+        public int hashCode() {
+            return name.hashCode();
+        }
+    }
 
     private record Need(int statement, Decomposition<DominantWeight> meaning, boolean usual) {}
 

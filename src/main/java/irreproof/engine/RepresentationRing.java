@@ -32,7 +32,19 @@ public interface RepresentationRing<I extends Comparable<? super I>> {
     Optional<CentralCharacter> centralCharacter(I irrep);
 
     /** {@code N-ality} with value {@code 2} of modulus {@code 3}; {@code congruence class} {@code (0,1)}. */
-    record CentralCharacter(String name, String value) {}
+    record CentralCharacter(String name, String value) {
+        // equals and hashCode written out: a record's generated ones cost a short run more than the rest of its work
+
+        @Override
+        public boolean equals(Object other) {
+            return other instanceof CentralCharacter that && value.equals(that.value) && name.equals(that.name);
+        }
+
+        @Override
+        public int hashCode() {
+            return value.hashCode();
+        }
+    }
 
     /** The product of two sums, decomposed. */
     default Decomposition<I> product(Decomposition<I> left, Decomposition<I> right, Budget budget) {

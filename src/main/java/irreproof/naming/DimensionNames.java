@@ -32,7 +32,19 @@ public final class DimensionNames {
         this.sharing = NameSharing.of(group);
     }
 
-    private record Key(LieGroup group, BigInteger dimension) {}
+    private record Key(LieGroup group, BigInteger dimension) {
+        // equals and hashCode written out: a record's generated ones cost a short run more than the rest of its work
+
+        @Override
+        public boolean equals(Object other) {
+            return other instanceof Key that && dimension.equals(that.dimension) && group.equals(that.group);
+        }
+
+        @Override
+        public int hashCode() {
+            return 31 * group.hashCode() + dimension.hashCode();
+        }
+    }
 
     /**
      * All irreps of one dimension.

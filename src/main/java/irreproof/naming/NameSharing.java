@@ -27,5 +27,20 @@ sealed interface NameSharing permits ConjugatePairs, TrialityImages {
     List<Candidate> read(List<Member> members, String suffix);
 
     /** An irrep and what tells it from those that share its number. */
-    record Member(DominantWeight irrep, boolean barred, String suffix) {}
+    record Member(DominantWeight irrep, boolean barred, String suffix) {
+        // equals and hashCode written out: a record's generated ones cost a short run more than the rest of its work
+
+        @Override
+        public boolean equals(Object other) {
+            return other instanceof Member that
+                    && barred == that.barred
+                    && irrep.equals(that.irrep)
+                    && suffix.equals(that.suffix);
+        }
+
+        @Override
+        public int hashCode() {
+            return irrep.hashCode();
+        }
+    }
 }

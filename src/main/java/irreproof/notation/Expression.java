@@ -115,5 +115,15 @@ public sealed interface Expression {
         public Decoration {
             charges = List.copyOf(charges);
         }
+
+        /** True if nothing is added. */
+        public boolean isEmpty() {
+            return bars == 0
+                    && primes == 0
+                    && label.isEmpty()
+                    && symmetry == null
+                    && charges.isEmpty()
+                    && other.isEmpty();
+        }
     }
 }

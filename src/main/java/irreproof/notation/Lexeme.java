@@ -80,9 +80,10 @@ final class Lexeme implements Token {
         return type;
     }
 
+    /** The parser never looks at it. */
     @Override
     public String getText() {
-        return content == BARE ? "" : content.toString();
+        return "";
     }
 
     @Override

@@ -143,14 +143,14 @@ final class OperandBuilder {
     static List<String> charges(Expression bracket) {
         if (!(bracket instanceof ListName list)
                 || list.bracket() != Expression.Bracket.ROUND
-                || !list.decoration().equals(Decoration.NONE)) {
+                || !list.decoration().isEmpty()) {
             return null;
         }
         List<String> charges = new ArrayList<>();
         for (Expression entry : list.entries()) {
             if (!(entry instanceof NumberName number)
                     || number.face() != Face.PLAIN
-                    || !number.decoration().equals(Decoration.NONE)) {
+                    || !number.decoration().isEmpty()) {
                 return null;
             }
             charges.add(number.numerator() + (number.denominator() == 1 ? "" : "/" + number.denominator()));

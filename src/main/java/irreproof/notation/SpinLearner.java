@@ -19,7 +19,7 @@ final class SpinLearner {
         for (Sample number : numbers) {
             String digits = number.name().numerator().toString();
             int at = number.text().indexOf(digits);
-            if (at >= 0 && number.name().decoration().equals(Expression.Decoration.NONE)) {
+            if (at >= 0 && number.name().decoration().isEmpty()) {
                 whole = Spelling.of(number.text().substring(0, at));
                 styled = number.name().face() != Face.PLAIN;
                 break;

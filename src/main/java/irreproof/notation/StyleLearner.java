@@ -182,7 +182,7 @@ final class StyleLearner {
             return new WrittenTerm.Dimension(
                     number.numerator(), decoration.bars(), decoration.primes(), decoration.label());
         }
-        return name instanceof DiagramName diagram && decoration.equals(Expression.Decoration.NONE)
+        return name instanceof DiagramName diagram && decoration.isEmpty()
                 ? new WrittenTerm.Diagram(diagram.rows())
                 : null;
     }
@@ -207,7 +207,7 @@ final class StyleLearner {
             }
             String open = source.substring(list.span().start(), first.start());
             String close = source.substring(last.end(), list.span().end());
-            if (list.decoration().equals(Expression.Decoration.NONE) && !separator.contains("\n")) {
+            if (list.decoration().isEmpty() && !separator.contains("\n")) {
                 return new ListStyle(open, separator, close);
             }
         }
@@ -219,7 +219,7 @@ final class StyleLearner {
         DiagramStyle style = null;
         boolean boxes = false;
         for (DiagramName diagram : diagrams) {
-            if (!diagram.decoration().equals(Expression.Decoration.NONE)) {
+            if (!diagram.decoration().isEmpty()) {
                 continue;
             }
             String text = diagram.span().of(source);

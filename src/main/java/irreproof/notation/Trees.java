@@ -1,7 +1,6 @@
 package irreproof.notation;
 
 import irreproof.notation.Expression.Conjugate;
-import irreproof.notation.Expression.Decoration;
 import irreproof.notation.Expression.DiagramName;
 import irreproof.notation.Expression.Dots;
 import irreproof.notation.Expression.Face;
@@ -55,7 +54,7 @@ final class Trees {
         return tree instanceof NumberName name
                 && name.face() == Face.PLAIN
                 && name.denominator() == 1
-                && name.decoration().equals(Decoration.NONE);
+                && name.decoration().isEmpty();
     }
 
     static BigInteger count(Expression tree) {

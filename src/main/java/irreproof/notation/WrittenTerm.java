@@ -23,7 +23,23 @@ public record WrittenTerm(BigInteger count, WrittenName name) {
      *
      * @param label the subscript that is part of the name ({@code v}), or empty
      */
-    public record Dimension(BigInteger dimension, int bars, int primes, String label) implements WrittenName {}
+    public record Dimension(BigInteger dimension, int bars, int primes, String label) implements WrittenName {
+        // equals and hashCode written out: a record's generated ones cost a short run more than the rest of its work
+
+        @Override
+        public boolean equals(Object other) {
+            return other instanceof Dimension that
+                    && bars == that.bars
+                    && primes == that.primes
+                    && dimension.equals(that.dimension)
+                    && label.equals(that.label);
+        }
+
+        @Override
+        public int hashCode() {
+            return 31 * dimension.hashCode() + 2 * primes + bars;
+        }
+    }
 
     /** Dynkin labels, or the entries of any other list in the author's brackets. */
     public record Labels(List<Integer> labels) implements WrittenName {

@@ -96,7 +96,7 @@ class LauncherIT {
     @Test
     void servesOnStandardInputAndOutput() throws Exception {
         Process process = start(Map.of(), LAUNCHER, "serve", "--stdio")
-                .redirectInput(Path.of("src/build/warm-up.lsp").toFile())
+                .redirectInput(Path.of("src/build/warm-up/session.lsp").toFile())
                 .start();
         Run run = finish(process);
         assertEquals(0, run.code());

@@ -10,7 +10,6 @@ import irreproof.naming.LieGroup;
 import irreproof.naming.YoungDiagrams;
 import irreproof.notation.Expression;
 import irreproof.notation.Expression.Bracket;
-import irreproof.notation.Expression.Decoration;
 import irreproof.notation.Expression.Face;
 import irreproof.notation.Expression.ListName;
 import irreproof.notation.Expression.NumberName;
@@ -32,7 +31,7 @@ final class BracketNames {
                         .anyMatch(entry -> !(entry instanceof NumberName number)
                                 ? !(entry instanceof Power)
                                 : number.face() != Face.PLAIN
-                                        || !number.decoration().equals(Decoration.NONE));
+                                        || !number.decoration().isEmpty());
     }
 
     /** The entries as numbers, exponents written out; empty if there is anything else among them. */

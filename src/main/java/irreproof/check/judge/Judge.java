@@ -19,9 +19,6 @@ import java.util.Optional;
  * engine's products are cached there.
  */
 public final class Judge<I extends Comparable<? super I>> {
-    /** A name without a meaning is further from holding than many wrong terms. */
-    private static final long UNKNOWN = 1000;
-
     /** Among how many failing readings the one nearest to holding is looked for. */
     private static final int REPORTED = 12;
 
@@ -101,7 +98,7 @@ public final class Judge<I extends Comparable<? super I>> {
                     List.of());
         }
         Judgement<I> nearest = failures.stream()
-                .min(Comparator.comparingLong(Judge::badness))
+                .min(Comparator.comparingLong(Judgement::distance))
                 .orElseGet(() -> Judgement.undecided("its names have no common meaning in this group"));
         if (nearest.outcome() == Outcome.FAILS && !differInDimension(nearest)) {
             Optional<String> doubt =
@@ -120,29 +117,6 @@ public final class Judge<I extends Comparable<? super I>> {
                         && !lexicon.ring()
                                 .dimension(comparison.expected())
                                 .equals(lexicon.ring().dimension(comparison.found())));
-    }
-
-    /** Of several failures, the one that is nearest to holding is what the author meant. */
-    private static long badness(Judgement<?> failure) {
-        return switch (failure.outcome()) {
-            case UNDECIDED -> -1;
-            case HOLDS, FAILS ->
-                failure.comparisons().stream().mapToLong(Judge::distance).sum()
-                        + failure.wrongParts().size()
-                        + UNKNOWN * failure.unknownNames().size()
-                        + failure.reading().unusual();
-            case NOT_ITS_GROUP -> Long.MAX_VALUE;
-        };
-    }
-
-    private static long distance(Comparison<?> comparison) {
-        return comparison.holds() ? 0 : 1 + size(comparison.missing()) + size(comparison.surplus());
-    }
-
-    private static long size(Decomposition<?> sum) {
-        return sum.multiplicities().values().stream()
-                .mapToLong(count -> Math.min(count, UNKNOWN))
-                .sum();
     }
 
     /** The other names decide, and what the sides with the unknown names must be is known all the same. */

@@ -47,6 +47,36 @@ public record Judgement<I extends Comparable<? super I>>(
         wrongParts = List.copyOf(wrongParts);
     }
 
+    /** A name without a meaning is further from holding than many wrong terms. */
+    private static final long UNKNOWN = 1000;
+
+    /**
+     * How far from holding: of several failures, the nearest is what the author meant. Undecided comes before all
+     * failures, another group behind them.
+     */
+    public long distance() {
+        return switch (outcome) {
+            case UNDECIDED -> -1;
+            case HOLDS -> reading.unusual();
+            case FAILS ->
+                comparisons.stream().mapToLong(Judgement::distance).sum()
+                        + wrongParts.size()
+                        + UNKNOWN * unknownNames.size()
+                        + reading.unusual();
+            case NOT_ITS_GROUP -> Long.MAX_VALUE;
+        };
+    }
+
+    private static long distance(Comparison<?> comparison) {
+        return comparison.holds() ? 0 : 1 + size(comparison.missing()) + size(comparison.surplus());
+    }
+
+    private static long size(Decomposition<?> sum) {
+        return sum.multiplicities().values().stream()
+                .mapToLong(count -> Math.min(count, UNKNOWN))
+                .sum();
+    }
+
     static <I extends Comparable<? super I>> Judgement<I> undecided(String reason) {
         return new Judgement<>(Outcome.UNDECIDED, reason, null, List.of(), List.of(), List.of(), List.of(), List.of());
     }
