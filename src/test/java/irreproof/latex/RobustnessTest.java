@@ -2,10 +2,12 @@ package irreproof.latex;
 
 import static org.junit.jupiter.api.Assertions.assertEquals;
 import static org.junit.jupiter.api.Assertions.assertFalse;
+import static org.junit.jupiter.api.Assertions.assertThrows;
 import static org.junit.jupiter.api.Assertions.assertTimeoutPreemptively;
 import static org.junit.jupiter.api.Assertions.assertTrue;
 
 import irreproof.budget.Budget;
+import irreproof.budget.BudgetExceeded;
 import irreproof.text.SourceText;
 import irreproof.text.Span;
 import java.time.Duration;
@@ -211,6 +213,12 @@ final class RobustnessTest {
             assertEquals("1", shown.get(0));
             assertEquals("2", shown.get(shown.size() - 1));
         });
+    }
+
+    @Test
+    void aBudgetThatIsTooSmallIsReported() {
+        SourceText source = new SourceText("x.tex", REALISTIC);
+        assertThrows(BudgetExceeded.class, () -> Reader.read(source, SourceProvider.none(), Budget.of(100)));
     }
 
     @Test

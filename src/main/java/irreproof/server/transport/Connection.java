@@ -1,5 +1,7 @@
 package irreproof.server.transport;
 
+import java.io.BufferedInputStream;
+import java.io.BufferedOutputStream;
 import java.io.InputStream;
 import java.io.OutputStream;
 import java.time.Duration;
@@ -44,11 +46,11 @@ public final class Connection {
                 new LinkedHashMap<>(ServiceEndpoints.getSupportedMethods(EditorClient.class));
         MessageJsonHandler json = new MessageJsonHandler(methods);
         Dispatcher dispatcher = new Dispatcher(this::report);
-        outbox = new Outbox(new StreamMessageConsumer(out, json));
+        outbox = new Outbox(new StreamMessageConsumer(new BufferedOutputStream(out), json));
         remote = new RemoteEndpoint(outbox, dispatcher, this::answer);
         remote.setJsonHandler(json);
         json.setMethodProvider(remote);
-        reader = new MessageReader(in, json, remote, this::report);
+        reader = new MessageReader(new BufferedInputStream(in), json, remote, this::report);
         client = ServiceEndpoints.toServiceObject(remote, EditorClient.class);
         methods.putAll(dispatcher.serve(services.apply(client)));
     }
