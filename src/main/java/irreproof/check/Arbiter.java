@@ -10,6 +10,7 @@ import irreproof.check.judge.Judge;
 import irreproof.check.judge.Judgement;
 import irreproof.check.judge.Judgement.Outcome;
 import irreproof.check.judge.LieLexicon;
+import irreproof.check.judge.Names;
 import irreproof.engine.lie.DominantWeight;
 import irreproof.naming.Resolution;
 import irreproof.notation.Relation;
@@ -76,6 +77,9 @@ final class Arbiter {
             if (trial.is(Outcome.UNDECIDED) && trials.stream().noneMatch(other -> other.is(Outcome.FAILS))) {
                 return settled(trial, Verdict.UNDECIDED, trial.judgement().reason());
             }
+            if (trial.is(Outcome.HOLDS) && isRemainder(statement)) {
+                return settled(trial, Verdict.UNDECIDED, "its left side stands elsewhere");
+            }
             if (trial.is(Outcome.HOLDS)) {
                 return holds(trial, trials, unsupported);
             }
@@ -88,6 +92,11 @@ final class Arbiter {
             return fails(statement, failed.get(), unsupported);
         }
         return noneFits(statement, trials, unsupported);
+    }
+
+    /** Sums that agree with each other say little if the product they decompose stands elsewhere. */
+    private static boolean isRemainder(Statement statement) {
+        return statement.continued() && statement.sides().stream().noneMatch(Names::multiplies);
     }
 
     private static Ruling holds(Trial trial, List<Trial> trials, SettingCandidate unsupported) {

@@ -84,7 +84,7 @@ final class Cards {
             return;
         }
         if (unknown) {
-            Names.children(expression).forEach(child -> add(child, reading));
+            expression.parts().forEach(child -> add(child, reading));
             return;
         }
         try {
@@ -109,7 +109,7 @@ final class Cards {
                 throw exceeded;
             }
         }
-        Names.children(expression).forEach(child -> add(child, reading));
+        expression.parts().forEach(child -> add(child, reading));
     }
 
     private void add(Name name, Decomposition<DominantWeight> value) {

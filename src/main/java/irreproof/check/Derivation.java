@@ -69,7 +69,7 @@ public final class Derivation {
         int reference = Chain.reference(statement);
         var side = statement.sides().get(reference);
         Statement bare =
-                new Statement(List.of(side), List.of(), side.span(), side.span().of(latex), List.of());
+                new Statement(List.of(side), List.of(), side.span(), side.span().of(latex), false, List.of());
         LieLexicon lexicon = new LieLexicon(group.group(), DeclaredNames.NONE);
         Judgement<DominantWeight> judgement = Judge.judge(bare, lexicon, budget);
         return switch (judgement.outcome()) {

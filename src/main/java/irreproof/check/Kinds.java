@@ -31,6 +31,6 @@ final class Kinds {
     private static boolean hasPower(Expression expression) {
         return expression instanceof Power
                 || expression instanceof Part
-                || Names.children(expression).stream().anyMatch(Kinds::hasPower);
+                || expression.parts().stream().anyMatch(Kinds::hasPower);
     }
 }

@@ -77,11 +77,23 @@ final class Evidence {
         return lexemes.stream().anyMatch(lexeme -> lexeme.is(type));
     }
 
+    /** A bit string; in brackets, 01 is a pair of Dynkin labels. */
     private boolean hasLeadingZero() {
-        return lexemes.stream()
-                .anyMatch(lexeme -> lexeme.content() instanceof Lexeme.Digits digits
-                        && digits.digits().length() > 1
-                        && digits.digits().startsWith("0"));
+        int depth = 0;
+        for (Lexeme lexeme : lexemes) {
+            if (lexeme.is(StatementParser.ROUND_OPEN) || lexeme.is(StatementParser.SQUARE_OPEN)) {
+                depth++;
+            } else if (Adjacency.closesBracket(lexeme)) {
+                depth--;
+            }
+            if (depth <= 0
+                    && lexeme.content() instanceof Lexeme.Digits digits
+                    && digits.digits().length() > 1
+                    && digits.digits().startsWith("0")) {
+                return true;
+            }
+        }
+        return false;
     }
 
     /** {@code (0,1,0)\oplus(0,0,1)}: only lists of whole numbers, nothing to compare with, or a sum that is one vector. */

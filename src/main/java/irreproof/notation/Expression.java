@@ -11,10 +11,20 @@ import java.util.List;
 public sealed interface Expression {
     Span span();
 
+    /** The expressions it is made of, left to right; none for a name or dots. */
+    default List<Expression> parts() {
+        return List.of();
+    }
+
     /** Terms joined by {@code \oplus} or {@code +}; two or more. */
     record Sum(List<Expression> terms, Span span) implements Expression {
         public Sum {
             terms = List.copyOf(terms);
+        }
+
+        @Override
+        public List<Expression> parts() {
+            return terms;
         }
     }
 
@@ -23,19 +33,44 @@ public sealed interface Expression {
         public Product {
             factors = List.copyOf(factors);
         }
+
+        @Override
+        public List<Expression> parts() {
+            return factors;
+        }
     }
 
     /** {@code 2\,\mathbf{8}}, {@code 2\cdot\mathbf{8}}, {@code 2\times\mathbf{8}}, {@code 2(1,1)}; the count may be 0. */
-    record Multiple(BigInteger count, Expression body, Span span) implements Expression {}
+    record Multiple(BigInteger count, Expression body, Span span) implements Expression {
+        @Override
+        public List<Expression> parts() {
+            return List.of(body);
+        }
+    }
 
     /** {@code \mathbf{3}^{\otimes 3}}, {@code \Lambda^2\mathbf{5}}, {@code \mathrm{Sym}^2(\mathbf{3})}. */
-    record Power(Expression base, PowerKind kind, int exponent, Span span) implements Expression {}
+    record Power(Expression base, PowerKind kind, int exponent, Span span) implements Expression {
+        @Override
+        public List<Expression> parts() {
+            return List.of(base);
+        }
+    }
 
     /** {@code (\mathbf{3}\otimes\mathbf{3})_S}: the symmetric or antisymmetric part of a square. */
-    record Part(Expression body, Symmetry symmetry, Span span) implements Expression {}
+    record Part(Expression body, Symmetry symmetry, Span span) implements Expression {
+        @Override
+        public List<Expression> parts() {
+            return List.of(body);
+        }
+    }
 
     /** A bar over something larger than one name: {@code \overline{\mathbf{3}\oplus\mathbf{6}}}. */
-    record Conjugate(Expression body, Span span) implements Expression {}
+    record Conjugate(Expression body, Span span) implements Expression {
+        @Override
+        public List<Expression> parts() {
+            return List.of(body);
+        }
+    }
 
     /** {@code \dots} and its kin: further terms that the author did not write. */
     record Dots(Span span) implements Expression {}

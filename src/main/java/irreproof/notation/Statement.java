@@ -8,11 +8,17 @@ import java.util.List;
  * single side (a bare product or sum) has no relation and asserts nothing.
  *
  * @param latex the source text of the span
+ * @param continued true if a relation stands before the first side: what it joins could not be read, or stands elsewhere
  * @param problems what in it could not be read, in the author's words; if there are any, the tree may be incomplete and
  *     no semantic finding may be made from it
  */
 public record Statement(
-        List<Expression> sides, List<Relation> relations, Span span, String latex, List<Problem> problems) {
+        List<Expression> sides,
+        List<Relation> relations,
+        Span span,
+        String latex,
+        boolean continued,
+        List<Problem> problems) {
     public Statement {
         sides = List.copyOf(sides);
         relations = List.copyOf(relations);

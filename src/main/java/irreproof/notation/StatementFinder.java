@@ -68,6 +68,7 @@ public final class StatementFinder {
         List<Lexeme> lexemes = new ArrayList<>();
         List<Statement.Problem> problems = new ArrayList<>();
         Span span = null;
+        boolean continued = false;
         for (int i = 0; i < segment.sides().size(); i++) {
             List<Lexeme> side = segment.sides().get(i);
             Lexeme before = i == 0 ? null : segment.relations().get(i - 1);
@@ -87,7 +88,9 @@ public final class StatementFinder {
                 problems.add(result.problem());
                 continue;
             }
-            if (!sides.isEmpty()) {
+            if (sides.isEmpty()) {
+                continued = i > 0;
+            } else {
                 Lexeme.Sign sign = (Lexeme.Sign) before.content();
                 relations.add(new Relation(sign.kind(), sign.negated(), before.span()));
             }
@@ -103,7 +106,7 @@ public final class StatementFinder {
         if (next != null && goesOnWith(next)) {
             problems.add(new Statement.Problem("the sum seems to go on behind this as a list", span));
         }
-        return new Statement(sides, relations, span, span.of(source), problems);
+        return new Statement(sides, relations, span, span.of(source), continued, problems);
     }
 
     private static boolean isBareName(Expression side) {

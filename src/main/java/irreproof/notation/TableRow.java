@@ -51,7 +51,7 @@ final class TableRow {
             return Optional.empty();
         }
         Span span = sides.get(0).span().cover(sides.get(sides.size() - 1).span());
-        return Optional.of(new Statement(sides, relations, span, span.of(source), List.of()));
+        return Optional.of(new Statement(sides, relations, span, span.of(source), false, List.of()));
     }
 
     /** The lexemes of a cell that holds one side and no relation; empty otherwise. */

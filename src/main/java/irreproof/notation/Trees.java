@@ -19,26 +19,9 @@ import java.util.List;
 final class Trees {
     private Trees() {}
 
+    /** Its parts, those of a list included. */
     static List<Expression> children(Expression tree) {
-        if (tree instanceof Sum sum) {
-            return sum.terms();
-        }
-        if (tree instanceof Product product) {
-            return product.factors();
-        }
-        if (tree instanceof Multiple multiple) {
-            return List.of(multiple.body());
-        }
-        if (tree instanceof Power power) {
-            return List.of(power.base());
-        }
-        if (tree instanceof Part part) {
-            return List.of(part.body());
-        }
-        if (tree instanceof Conjugate conjugate) {
-            return List.of(conjugate.body());
-        }
-        return tree instanceof ListName list ? list.entries() : List.of();
+        return tree instanceof ListName list ? list.entries() : tree.parts();
     }
 
     /** True if the tree multiplies anywhere. */
@@ -46,7 +29,7 @@ final class Trees {
         return tree instanceof Product
                 || tree instanceof Power
                 || tree instanceof Part
-                || !(tree instanceof ListName) && children(tree).stream().anyMatch(Trees::multiplies);
+                || tree.parts().stream().anyMatch(Trees::multiplies);
     }
 
     /** A plain whole number without anything attached. */

@@ -21,6 +21,7 @@ class CheckerTest {
                 "SU(3) | 3\\otimes\\bar 3=8\\oplus1",
                 "SU(3) | \\mathbf{8}\\otimes\\mathbf{8}=\\mathbf{27}\\oplus\\mathbf{10}\\oplus\\overline{\\mathbf{10}}\\oplus 2\\,\\mathbf{8}\\oplus\\mathbf{1}",
                 "SU(3) | (1,0)\\otimes(2,0)=(3,0)\\oplus(1,1)",
+                "SU(3) | (10)\\otimes(01)=(11)\\oplus(00)",
                 "SU(3) | \\yng(1)\\otimes\\yng(1,1)=\\yng(2,1)\\oplus\\yng(1,1,1)",
                 "SU(3) | \\mathbf{3}^{\\otimes3}=\\mathbf{10}\\oplus\\mathbf{8}\\oplus\\mathbf{8}\\oplus\\mathbf{1}",
                 "SU(3) | 3\\otimes(6\\oplus\\bar 3)=10\\oplus8\\oplus8\\oplus1",
@@ -118,6 +119,17 @@ class CheckerTest {
         assertEquals(
                 Verdict.UNDECIDED,
                 only("SU(3)", "\\mathbf{3}\\otimes\\mathbf{3}\\to\\mathbf{6}").verdict());
+    }
+
+    /** Sums that continue a product elsewhere agree with each other, but nobody looked at the product. */
+    @Test
+    void doesNotVouchForARightSideAlone() {
+        StatementReport remainder = only("SU(3)", "&=\\mathbf{8}\\oplus\\mathbf{1} = \\mathbf{1}\\oplus\\mathbf{8}");
+        assertEquals(Verdict.UNDECIDED, remainder.verdict());
+        assertEquals("its left side stands elsewhere", remainder.reason());
+        StatementReport field =
+                only("SU(3)", "Q\\bar q = \\mathbf{3}\\otimes\\bar{\\mathbf{3}} = \\mathbf{1}\\oplus\\mathbf{8}");
+        assertEquals(Verdict.HOLDS, field.verdict());
     }
 
     @Test

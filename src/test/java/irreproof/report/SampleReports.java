@@ -100,7 +100,7 @@ final class SampleReports {
             Verdict verdict,
             String reason,
             List<Finding> findings) {
-        Statement statement = new Statement(List.of(), List.of(), find(source, latex), latex, List.of());
+        Statement statement = new Statement(List.of(), List.of(), find(source, latex), latex, false, List.of());
         return new StatementReport(
                 statement, StatementKind.PRODUCT, setting, settingSource, null, verdict, reason, findings, List.of());
     }

@@ -72,7 +72,7 @@ final class DimensionSums {
                         number.group() + "'",
                         List.of(new Card.Row("dimension", number.group())))));
         return new StatementReport(
-                new Statement(List.of(), List.of(), whole, match.group(), List.of()),
+                new Statement(List.of(), List.of(), whole, match.group(), false, List.of()),
                 StatementKind.PRODUCT,
                 setting,
                 named ? SettingSource.PROSE : SettingSource.PROJECT,

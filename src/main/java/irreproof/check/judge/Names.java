@@ -1,9 +1,7 @@
 package irreproof.check.judge;
 
 import irreproof.notation.Expression;
-import irreproof.notation.Expression.Conjugate;
 import irreproof.notation.Expression.Dots;
-import irreproof.notation.Expression.Multiple;
 import irreproof.notation.Expression.Name;
 import irreproof.notation.Expression.Part;
 import irreproof.notation.Expression.Power;
@@ -16,29 +14,6 @@ import java.util.List;
 public final class Names {
     private Names() {}
 
-    /** The parts of an expression, left to right; none for a name or dots. */
-    public static List<Expression> children(Expression expression) {
-        if (expression instanceof Sum sum) {
-            return sum.terms();
-        }
-        if (expression instanceof Product product) {
-            return product.factors();
-        }
-        if (expression instanceof Multiple multiple) {
-            return List.of(multiple.body());
-        }
-        if (expression instanceof Power power) {
-            return List.of(power.base());
-        }
-        if (expression instanceof Part part) {
-            return List.of(part.body());
-        }
-        if (expression instanceof Conjugate conjugate) {
-            return List.of(conjugate.body());
-        }
-        return List.of();
-    }
-
     /** Every name in the expression, left to right. */
     public static List<Name> of(Expression expression) {
         List<Name> names = new ArrayList<>();
@@ -50,7 +25,7 @@ public final class Names {
         if (expression instanceof Name name) {
             names.add(name);
         }
-        children(expression).forEach(child -> collect(child, names));
+        expression.parts().forEach(child -> collect(child, names));
     }
 
     /** True if the side leaves terms out at its top level: a sum with dots. */
@@ -61,12 +36,12 @@ public final class Names {
 
     /** True if dots stand anywhere below the top level, where they leave the meaning open. */
     public static boolean hasInnerDots(Expression side) {
-        return children(side).stream().anyMatch(child -> !(child instanceof Dots) && holdsDots(child))
+        return side.parts().stream().anyMatch(child -> !(child instanceof Dots) && holdsDots(child))
                 || side instanceof Product product && product.factors().stream().anyMatch(Dots.class::isInstance);
     }
 
     private static boolean holdsDots(Expression expression) {
-        return expression instanceof Dots || children(expression).stream().anyMatch(Names::holdsDots);
+        return expression instanceof Dots || expression.parts().stream().anyMatch(Names::holdsDots);
     }
 
     /** True if the expression multiplies: the side that the others must agree with. */
@@ -74,7 +49,7 @@ public final class Names {
         return expression instanceof Product
                 || expression instanceof Power
                 || expression instanceof Part
-                || children(expression).stream().anyMatch(Names::multiplies);
+                || expression.parts().stream().anyMatch(Names::multiplies);
     }
 
     /** The summands of a side as written; a side that is no sum is its own only term. */
