@@ -63,7 +63,7 @@ final class Fixtures {
         return tests.stream();
     }
 
-    private static String resource(String name) throws IOException {
+    static String resource(String name) throws IOException {
         try (InputStream stream = Fixtures.class.getResourceAsStream("/notation/" + name)) {
             return new String(stream.readAllBytes(), StandardCharsets.UTF_8);
         }

@@ -147,8 +147,12 @@ final class Editor implements LanguageClient, AutoCloseable {
     }
 
     List<Either<Command, CodeAction>> codeActions(Range range, CodeActionContext context) {
+        return codeActions(URI, range, context);
+    }
+
+    List<Either<Command, CodeAction>> codeActions(String uri, Range range, CodeActionContext context) {
         return await(server.getTextDocumentService()
-                .codeAction(new CodeActionParams(new TextDocumentIdentifier(URI), range, context)));
+                .codeAction(new CodeActionParams(new TextDocumentIdentifier(uri), range, context)));
     }
 
     PublishDiagnosticsParams nextDiagnostics() {

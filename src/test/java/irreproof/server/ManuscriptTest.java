@@ -1,6 +1,7 @@
 package irreproof.server;
 
 import static org.junit.jupiter.api.Assertions.assertEquals;
+import static org.junit.jupiter.api.Assertions.assertFalse;
 import static org.junit.jupiter.api.Assertions.assertTrue;
 
 import irreproof.budget.Budget;
@@ -16,9 +17,11 @@ import java.nio.file.Files;
 import java.nio.file.Path;
 import java.time.Duration;
 import java.util.List;
+import org.eclipse.lsp4j.CodeActionContext;
 import org.eclipse.lsp4j.Diagnostic;
 import org.eclipse.lsp4j.PublishDiagnosticsParams;
 import org.eclipse.lsp4j.TextDocumentContentChangeEvent;
+import org.eclipse.lsp4j.TextEdit;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.params.ParameterizedTest;
 import org.junit.jupiter.params.provider.ValueSource;
@@ -29,7 +32,8 @@ class ManuscriptTest {
 
     private static Editor editor() {
         Editor editor = new Editor(Checker::check, Duration.ZERO);
-        editor.initialize("{capabilities: {textDocument: {hover: {contentFormat: ['markdown']}}}}");
+        editor.initialize("{capabilities: {textDocument: {hover: {contentFormat: ['markdown']},"
+                + " codeAction: {codeActionLiteralSupport: {codeActionKind: {valueSet: []}}}}}}");
         return editor;
     }
 
@@ -95,6 +99,45 @@ class ManuscriptTest {
                     "- Young diagram:")) {
                 assertTrue(octet.contains(fact), fact + " in:\n" + octet);
             }
+        }
+    }
+
+    @Test
+    void everyQuickFixMendsItsFindingAndBreaksNothing() throws IOException {
+        String uri = DEMO.resolve("lantern.tex").toUri().toString();
+        String text = Files.readString(DEMO.resolve("lantern.tex"));
+        try (Editor editor = editor()) {
+            editor.open(uri, 1, text);
+            List<Diagnostic> shown = editor.nextDiagnostics().getDiagnostics();
+            int version = 1;
+            int fixed = 0;
+            for (Diagnostic finding : shown) {
+                for (var action :
+                        editor.codeActions(uri, finding.getRange(), new CodeActionContext(List.of(finding)))) {
+                    TextEdit edit =
+                            action.getRight().getEdit().getChanges().get(uri).get(0);
+                    editor.change(
+                            uri, ++version, new TextDocumentContentChangeEvent(edit.getRange(), edit.getNewText()));
+                    List<Diagnostic> left = editor.nextDiagnostics().getDiagnostics();
+                    assertEquals(shown.size() - 1, left.size(), edit.toString());
+                    assertFalse(left.contains(finding), edit.toString());
+                    editor.change(uri, ++version, new TextDocumentContentChangeEvent(text));
+                    assertEquals(shown, editor.nextDiagnostics().getDiagnostics());
+                    fixed++;
+                }
+            }
+            assertTrue(fixed >= 4, fixed + " fixes");
+        }
+    }
+
+    @Test
+    void theGroupOfTheSettingsDecides() {
+        try (Editor editor = new Editor(Checker::check, Duration.ZERO)) {
+            editor.initialize("{initializationOptions: {group: 'SU(4)'}}");
+            editor.open("$\\mathbf{4}\\otimes\\mathbf{4} = \\mathbf{6}\\oplus\\mathbf{10}$"
+                    + " and $\\mathbf{4}\\otimes\\mathbf{4} = \\mathbf{15}\\oplus\\mathbf{1}$");
+            assertEquals(1, editor.nextDiagnostics().getDiagnostics().size());
+            assertTrue(editor.hover(0, 3).contains("of SU(4)"), editor.hover(0, 3));
         }
     }
 }
