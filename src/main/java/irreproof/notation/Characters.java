@@ -10,6 +10,11 @@ final class Characters {
         return c == '\'' || c == '’' || c == '′';
     }
 
+    /** A bar that is set over the character before it. */
+    static boolean isCombiningBar(char c) {
+        return c == '\u0304' || c == '\u0305';
+    }
+
     /** The relation a character stands for, or null. */
     static Relation.Kind relation(char c) {
         return switch (c) {

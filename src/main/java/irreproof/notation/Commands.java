@@ -23,6 +23,9 @@ final class Commands {
     /** Leave it out with the length or number behind it, in braces or not. */
     record DroppedDimension() implements Meaning {}
 
+    /** The rest of the display is its number. */
+    record EquationNumber() implements Meaning {}
+
     /** Text between rows: ends a statement. */
     record Interruption() implements Meaning {}
 
@@ -143,6 +146,7 @@ final class Commands {
                 "Rightarrow Longrightarrow implies iff Leftrightarrow Longleftrightarrow leftrightarrow longleftrightarrow"
                         + " leftarrow longleftarrow gets Leftarrow Longleftarrow impliedby approx propto le leq ge geq ll gg"
                         + " lt gt colon therefore because mid par Longmapsto");
+        put(new EquationNumber(), "eqno leqno");
         put(new Interruption(), "intertext shortintertext");
     }
 

@@ -5,6 +5,7 @@ import irreproof.latex.Token;
 import irreproof.latex.TokenKind;
 import irreproof.notation.Expression.Face;
 import irreproof.notation.parser.StatementParser;
+import irreproof.text.Span;
 import java.util.ArrayList;
 import java.util.List;
 
@@ -108,6 +109,11 @@ final class Lowering {
         read(argument.from(), argument.to(), face, depth + 1);
         if (lexemes.size() == before + 1) {
             lexemes.remove(before);
+        } else if (lexemes.size() == before + 2 && Adjacency.joins(last())) {
+            Span whole = tape.span(command, argument.next());
+            Lexeme sign = last();
+            lexemes.subList(before, lexemes.size()).clear();
+            lexemes.add(new Lexeme(sign.getType(), sign.content(), whole));
         } else {
             add(StatementParser.GROUP_CLOSE, argument.to(), argument.next());
         }
@@ -165,6 +171,10 @@ final class Lowering {
             YoungReader.Result singlet = young.read(YoungReader.Form.SINGLET, i, to);
             lexemes.add(singlet.lexeme());
             return singlet.next();
+        }
+        if (Characters.isCombiningBar(c)) {
+            lexemes.add(new Lexeme(StatementParser.STARS, new Lexeme.Count(1), tape.span(i, i + 1)));
+            return i + 1;
         }
         return c == '~' ? i + 1 : add(Characters.type(c), i, i + 1);
     }
@@ -250,6 +260,9 @@ final class Lowering {
         if (meaning instanceof Commands.DroppedDimension) {
             return noise.dimension(i + 1, to);
         }
+        if (meaning instanceof Commands.EquationNumber) {
+            return to;
+        }
         if (meaning instanceof Commands.Interruption) {
             int next = noise.command(i, to, 1);
             return add(StatementParser.BREAK, i, next);
@@ -262,7 +275,10 @@ final class Lowering {
             return signs.longArrow(i, to);
         }
         if (meaning instanceof Commands.Stacked stacked) {
-            return signs.stacked(i, to, stacked.remarks());
+            TokenTape.Argument base = signs.base(i, to, stacked.remarks());
+            return signs.isRemarkOnName(i, to, base)
+                    ? remarked(i, to, base, face, depth)
+                    : signs.stacked(i, to, stacked.remarks(), base);
         }
         if (meaning instanceof Commands.Negation) {
             return signs.negation(i, to);
@@ -283,6 +299,14 @@ final class Lowering {
             return environments.read(environment.begin(), i, to);
         }
         return add(StatementParser.UNREADABLE, i, i + 1);
+    }
+
+    /** {@code \overset{S}{\mathbf{6}}}: the remark says what a subscript would. */
+    private int remarked(int i, int to, TokenTape.Argument base, Face face, int depth) {
+        enclose(StatementParser.GROUP_OPEN, i, base, face, depth);
+        TokenTape.Argument remark = tape.argument(i + 1, to);
+        Scripts.addSubscript(tape, remark, tape.span(base.to(), base.next()), lexemes);
+        return base.next();
     }
 
     /** A sized bracket is one with its command; the invisible delimiter is nothing. */

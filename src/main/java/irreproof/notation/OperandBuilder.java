@@ -10,6 +10,7 @@ import irreproof.notation.Expression.Name;
 import irreproof.notation.Expression.NumberName;
 import irreproof.notation.Expression.Part;
 import irreproof.notation.Expression.Power;
+import irreproof.notation.Expression.Sum;
 import irreproof.notation.Expression.Symmetry;
 import irreproof.notation.parser.StatementParser;
 import irreproof.notation.parser.StatementParser.AtomContext;
@@ -97,6 +98,10 @@ final class OperandBuilder {
         return inner instanceof Name name ? Decorations.withBars(name, 1, span) : new Conjugate(inner, span);
     }
 
+    /**
+     * A subscript S or A behind a bracket makes a part of a square; behind a bracketed sum of names, which has none, it
+     * says of each name to which part it belongs.
+     */
     private static Expression marked(Expression tree, Lexeme mark) {
         Span span = tree.span().cover(mark.span());
         if (mark.is(StatementParser.EXPONENT)) {
@@ -117,6 +122,15 @@ final class OperandBuilder {
                 return Decorations.withScript(name, script, span);
             }
             Symmetry symmetry = symmetry(script.meaning());
+            if (symmetry != null
+                    && tree instanceof Sum sum
+                    && sum.terms().stream().allMatch(Trees::isUnmarkedName)) {
+                return new Sum(
+                        sum.terms().stream()
+                                .map(term -> Trees.withSymmetry(term, symmetry))
+                                .toList(),
+                        span);
+            }
             if (symmetry != null && !(tree instanceof Dots)) {
                 return new Part(tree, symmetry, span);
             }

@@ -68,6 +68,15 @@ final class Scripts {
         return argument.next();
     }
 
+    /** Adds a remark as if it were a subscript. */
+    static void addSubscript(TokenTape tape, TokenTape.Argument remark, Span span, List<Lexeme> lexemes) {
+        addSubscript(subscript(tape, remark), span, lexemes);
+    }
+
+    static boolean saysPart(TokenTape tape, TokenTape.Argument remark) {
+        return subscript(tape, remark).meaning() instanceof ScriptMeaning.Part;
+    }
+
     private static void addSubscript(Lexeme.Script script, Span span, List<Lexeme> lexemes) {
         if (!(script.meaning() instanceof ScriptMeaning.Nothing)) {
             lexemes.add(new Lexeme(StatementParser.SUBSCRIPT, script, span));

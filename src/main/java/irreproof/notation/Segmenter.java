@@ -60,37 +60,54 @@ final class Segmenter {
         }
     }
 
-    /** Groups that hold whole sides ({@code {\color{red} 8\otimes 8 = ...}}) are taken away. */
+    /**
+     * Groups that hold whole sides ({@code {\color{red} 8\otimes 8 = ...}}) are taken away, and brackets that do, as
+     * around a condition ({@code (N=3)}), cut like a break.
+     */
     private List<Lexeme> withoutOuterGroups() {
-        boolean[] removed = new boolean[lexemes.size()];
+        boolean[] unwrapped = new boolean[lexemes.size()];
         Deque<Integer> open = new ArrayDeque<>();
-        for (int i = 0; i < removed.length; i++) {
+        for (int i = 0; i < unwrapped.length; i++) {
             Lexeme lexeme = lexemes.get(i);
             if (Adjacency.opens(lexeme) && partners[i] != NONE) {
                 open.push(i);
             } else if (partners[i] != NONE) {
                 open.pop();
             } else if (lexeme.is(StatementParser.RELATION) || lexeme.is(StatementParser.BREAK)) {
-                unwrap(open, removed);
+                unwrap(open, unwrapped, lexeme.is(StatementParser.RELATION));
             }
         }
         List<Lexeme> kept = new ArrayList<>();
-        for (int i = 0; i < removed.length; i++) {
-            if (!removed[i]) {
-                kept.add(lexemes.get(i));
+        for (int i = 0; i < unwrapped.length; i++) {
+            Lexeme lexeme = lexemes.get(i);
+            boolean group = lexeme.is(StatementParser.GROUP_OPEN) || lexeme.is(StatementParser.GROUP_CLOSE);
+            if (!unwrapped[i]) {
+                kept.add(lexeme);
+            } else if (!group) {
+                kept.add(Lexeme.bare(StatementParser.BREAK, lexeme.span()));
             }
         }
         return kept;
     }
 
-    private void unwrap(Deque<Integer> open, boolean[] removed) {
+    private void unwrap(Deque<Integer> open, boolean[] unwrapped, boolean relation) {
         for (int opener : open) {
-            if (removed[opener] || !lexemes.get(opener).is(StatementParser.GROUP_OPEN)) {
+            boolean group = lexemes.get(opener).is(StatementParser.GROUP_OPEN);
+            if (unwrapped[opener] || !group && !(relation && standsAlone(opener))) {
                 return;
             }
-            removed[opener] = true;
-            removed[partners[opener]] = true;
+            unwrapped[opener] = true;
+            unwrapped[partners[opener]] = true;
         }
+    }
+
+    /** A printing bracket that no operator ties to what stands before or behind it. */
+    private boolean standsAlone(int opener) {
+        Lexeme before = neighbour(opener, -1);
+        Lexeme behind = neighbour(partners[opener], 1);
+        return !lexemes.get(opener).is(StatementParser.BAR_OPEN)
+                && (before == null || !Adjacency.joins(before) && !Adjacency.opens(before))
+                && (behind == null || !Adjacency.joins(behind) && !Adjacency.isMark(behind));
     }
 
     private List<Segment> segments() {

@@ -42,29 +42,43 @@ final class Signs {
         return unreadable(i, i + 1);
     }
 
-    /** A relation with remarks stacked on it; one with a question mark asserts nothing and ends the statement. */
-    int stacked(int i, int to, int remarks) {
-        int start = i + 1;
-        boolean doubtful = false;
-        for (int left = remarks; left > 0; left--) {
-            TokenTape.Argument remark = tape.argument(start, to);
-            if (remark == null) {
-                return unreadable(i, i + 1);
-            }
-            doubtful |= tape.text(remark.from(), remark.to()).contains("?");
-            start = remark.next();
+    /** What the remarks are stacked on; null if it is missing. */
+    TokenTape.Argument base(int i, int to, int remarks) {
+        TokenTape.Argument argument = tape.argument(i + 1, to);
+        for (int left = remarks; left > 0 && argument != null; left--) {
+            argument = tape.argument(argument.next(), to);
         }
-        TokenTape.Argument base = tape.argument(start, to);
+        return argument;
+    }
+
+    /** True if one remark, which says to which part of a square a name belongs, is set over or under a styled name. */
+    boolean isRemarkOnName(int i, int to, TokenTape.Argument base) {
+        TokenTape.Argument remark = base == null ? null : tape.argument(i + 1, to);
+        if (remark == null || remark.next() >= base.from() + 1 || base.from() >= base.to()) {
+            return false;
+        }
+        boolean styled = tape.at(base.from()).kind() == TokenKind.CONTROL_WORD
+                && (Commands.of(tape.at(base.from()).text()) instanceof Commands.Faced
+                        || Commands.of(tape.at(base.from()).text()) instanceof Commands.Bar);
+        return styled && Scripts.saysPart(tape, remark);
+    }
+
+    /** A relation with remarks stacked on it; one with a question mark asserts nothing and ends the statement. */
+    int stacked(int i, int to, int remarks, TokenTape.Argument base) {
         if (base == null) {
-            return unreadable(i, start);
+            return unreadable(i, i + 1);
         }
         Lexeme.Sign sign = sign(base);
         if (sign == null) {
             return unreadable(i, base.next());
         }
-        if (doubtful) {
-            lexemes.add(Lexeme.bare(StatementParser.BREAK, tape.span(i, base.next())));
-            return base.next();
+        TokenTape.Argument remark = tape.argument(i + 1, to);
+        for (int left = remarks; left > 0 && remark != null; left--) {
+            if (tape.text(remark.from(), remark.to()).contains("?")) {
+                lexemes.add(Lexeme.bare(StatementParser.BREAK, tape.span(i, base.next())));
+                return base.next();
+            }
+            remark = tape.argument(remark.next(), to);
         }
         return relation(sign.kind(), sign.negated(), i, base.next());
     }

@@ -30,7 +30,8 @@ public final class StatementFinder {
             List<Segment> segments = Segmenter.cut(Lowering.lower(tokens, budget));
             for (int i = 0; i < segments.size(); i++) {
                 Segment next = i + 1 < segments.size() ? segments.get(i + 1) : null;
-                Statement statement = read(source, segments.get(i), next, reader, budget);
+                Segment segment = IndexLetters.settle(segments.get(i));
+                Statement statement = read(source, segment, next, reader, budget);
                 if (statement != null) {
                     statements.add(statement);
                 }

@@ -1,6 +1,7 @@
 package irreproof.notation;
 
 import irreproof.notation.Expression.Conjugate;
+import irreproof.notation.Expression.Decoration;
 import irreproof.notation.Expression.DiagramName;
 import irreproof.notation.Expression.Dots;
 import irreproof.notation.Expression.Face;
@@ -42,6 +43,26 @@ final class Trees {
 
     static BigInteger count(Expression tree) {
         return ((NumberName) tree).numerator();
+    }
+
+    /** A name, or several copies of one, that says nothing yet of symmetry. */
+    static boolean isUnmarkedName(Expression tree) {
+        if (tree instanceof Multiple multiple) {
+            return isUnmarkedName(multiple.body());
+        }
+        return tree instanceof Expression.Name name && name.decoration().symmetry() == null;
+    }
+
+    static Expression withSymmetry(Expression tree, Expression.Symmetry symmetry) {
+        if (tree instanceof Multiple multiple) {
+            return new Multiple(multiple.count(), withSymmetry(multiple.body(), symmetry), multiple.span());
+        }
+        Expression.Name name = (Expression.Name) tree;
+        Decoration old = name.decoration();
+        return Decorations.with(
+                name,
+                new Decoration(old.bars(), old.primes(), old.label(), symmetry, old.charges(), old.other()),
+                name.span());
     }
 
     /** True if a number in front of this can only be a multiplicity: it holds a styled name, a list or a diagram. */
