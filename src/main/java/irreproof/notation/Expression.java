@@ -84,7 +84,8 @@ public sealed interface Expression {
      * A number: a dimension name, a spin, or a highest weight. {@code \overline{\mathbf{10}}}, {@code 15'},
      * {@code 8_v}, {@code 3/2}.
      *
-     * @param denominator 1 for a whole number, 2 for a half-integral spin
+     * @param denominator 1 for a whole number, 2 for a half-integral spin; inside a list, where a charge can stand, any
+     *     other, and the numerator may be negative
      */
     record NumberName(BigInteger numerator, int denominator, Face face, Decoration decoration, Span span)
             implements Name {}
@@ -139,9 +140,11 @@ public sealed interface Expression {
      * @param bars how many bars, stars or daggers-as-bars the name carries
      * @param primes how many primes
      * @param label a subscript that is part of the name ({@code v}, {@code s}, {@code c}, {@code +}, {@code -}), or empty
-     * @param symmetry a subscript {@code S}, {@code A} ({@code s}, {@code a} outside SO(8)'s labels, {@code sym},
-     *     {@code antisym}), or null. A subscript that can be either ({@code s}) is kept in the label as written
-     * @param charges charges written as a subscript or in parentheses behind the name, as written; empty if none
+     * @param symmetry a subscript {@code S}, {@code A}, {@code a}, {@code sym}, {@code antisym}, or null. A subscript that
+     *     can also be part of the name ({@code s}) is kept in the label as written; beside a subscript {@code b} an
+     *     {@code a} is an index
+     * @param charges numbers written as a subscript or in parentheses behind the name, each as plain text ({@code +1/2},
+     *     {@code -4}, {@code ±6}); empty if none. Authors also number copies of a name like this ({@code 8_1})
      * @param other any other subscript or superscript, as written (a flavour or field label), or empty
      */
     record Decoration(int bars, int primes, String label, Symmetry symmetry, List<String> charges, String other) {

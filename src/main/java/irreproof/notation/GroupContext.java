@@ -5,9 +5,13 @@ import java.util.regex.Pattern;
 /** Whether the words beside a name say that it is a group: for names that could be anything else. */
 final class GroupContext {
     private static final int REACH = 48;
-    private static final Pattern BEHIND = Pattern.compile("^[-\\s,]*(?:\\p{L}+[-\\s]+){0,2}"
+    private static final Pattern BEHIND = Pattern.compile("^[-\\s]*(?:(?:flavou?r|discrete|finite|modular|point|family"
+            + "|horizontal|gauge|global|local|non-[Aa]belian|[Aa]belian|symmetric|alternating|dihedral|cyclic|tetrahedral"
+            + "|octahedral|icosahedral|[Ll]ie|simple|exceptional|colou?r|rotation|crystal|molecular|permutation|double|binary)"
+            + "[-\\s]+){0,3}"
             + "(?:groups?|subgroups?|algebras?|subalgebras?|symmetry|symmetries|irreps?|representations?|singlets?|doublets?"
             + "|triplets?|multiplets?|flavou?r|invariant|invariance|models?|characters?)\\b.*");
+    private static final Pattern ENUMERATION = Pattern.compile("\\s*(?:,|and|or|,\\s*and|,\\s*or|→|⊃|⊂)\\s*");
     private static final Pattern BEFORE =
             Pattern.compile(".*\\b(?:groups?|subgroups?|algebras?|subalgebras?|symmetry|symmetries"
                     + "|irreps? of|representations? of|multiplets? of|singlets? of|doublets? of|triplets? of|invariant under|under)"
@@ -19,6 +23,13 @@ final class GroupContext {
         String before = oneLine(text.substring(Math.max(0, start - REACH), start));
         String behind = oneLine(text.substring(end, Math.min(text.length(), end + REACH)));
         return BEHIND.matcher(behind).matches() || BEFORE.matcher(before).matches();
+    }
+
+    /** True if nothing but "and" or the like stands between a group and a name. */
+    static boolean isEnumerated(String text, int groupEnd, int start) {
+        return groupEnd <= start
+                && start - groupEnd < REACH
+                && ENUMERATION.matcher(text.substring(groupEnd, start)).matches();
     }
 
     /** Stops at a paragraph break and treats line ends as blanks. */

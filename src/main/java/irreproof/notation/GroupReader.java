@@ -26,6 +26,7 @@ public final class GroupReader {
         List<GroupName> names = new ArrayList<>();
         GroupPatterns patterns = new GroupPatterns(text.text());
         int position = 0;
+        int lastEnd = -1;
         while (true) {
             int start = patterns.next(position);
             if (start < 0) {
@@ -36,8 +37,11 @@ public final class GroupReader {
                 position = start + 1;
                 continue;
             }
-            boolean certain = chain.certain() || GroupContext.speaksOfGroups(text.text(), start, chain.end());
+            boolean certain = chain.certain()
+                    || GroupContext.speaksOfGroups(text.text(), start, chain.end())
+                    || lastEnd >= 0 && GroupContext.isEnumerated(text.text(), lastEnd, start);
             if (certain) {
+                lastEnd = chain.end();
                 names.add(new GroupName(bracketPower(text.text(), start, chain), text.origin(start, chain.end())));
             }
             position = chain.end();

@@ -51,8 +51,7 @@ final class Fixtures {
             if (line.startsWith("=> ")) {
                 String latex = source.toString().stripTrailing();
                 String expected = line.substring(3).strip();
-                tests.add(DynamicTest.dynamicTest(
-                        latex, () -> assertEquals(expected, Written.statements(statements(latex)))));
+                tests.add(DynamicTest.dynamicTest(latex, () -> reads(latex, expected)));
                 source.setLength(0);
             } else {
                 source.append(line).append('\n');
@@ -61,6 +60,13 @@ final class Fixtures {
         assertFalse(tests.isEmpty(), name + " holds no fixtures");
         assertEquals("", source.toString(), name + " ends without a result");
         return tests.stream();
+    }
+
+    /** The line ends of the file make no difference. */
+    private static void reads(String latex, String expected) {
+        for (String lineEnd : List.of("\n", "\r\n", "\r")) {
+            assertEquals(expected, Written.statements(statements(latex.replace("\n", lineEnd))));
+        }
     }
 
     static String resource(String name) throws IOException {

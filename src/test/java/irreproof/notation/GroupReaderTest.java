@@ -33,6 +33,9 @@ class GroupReaderTest {
             $D_{3h}$, $\\mathcal{C}_{\\rm 3v}$ and $O_h$ | D[3]h C[3]v O[]h
             an $A_4$ flavour symmetry and the group $S_4$ | A[4] S[4]
             the point group $T_d$ | T[]d
+            the groups $A_4$, $S_4$ and $A_5$ | A[4] S[4] A[5]
+            $E_8\\times E_8$ or $SO(32)$ strings | E[8]*E[8] SO[32]
+            ${\\rm SU}(2)_{\\rm L}$ $\\times$ ${\\rm SU}(2)_{\\rm R}$ | SU[2]_L*SU[2]_R
             SU(5)-breaking and the SU(5)s | SU[5] SU[5]_s
             $SU^*(4)$ and $SO^*(8)$ | SU[4] SO[8]
             an $O(3)$ vector of $O(N)$ models | O[3] O[]
@@ -52,6 +55,7 @@ class GroupReaderTest {
             the E6SSM
             ISO(3) and cosu(3)
             $T_d$ is the temperature at decoupling
+            the $C_2$ of a representation and $T_2$ in the group
             $C_v$, $C_{10}$ and $B_1$
             """)
     void keepsSilentOnLookAlikes(String latex) {
