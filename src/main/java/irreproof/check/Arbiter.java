@@ -132,9 +132,7 @@ final class Arbiter {
         }
         if (unsupported != null && !near.isNearerThan(unsupported.near())) {
             return Ruling.undecided(
-                    unsupported.group().display() + ": " + reason(unsupported),
-                    unsupported,
-                    unsupported.near().source());
+                    reason(unsupported), unsupported, unsupported.near().source());
         }
         if (failed.setting().factor()) {
             return settled(failed, Verdict.UNDECIDED, "it may be about another factor of the group");
@@ -163,9 +161,7 @@ final class Arbiter {
         }
         if (unsupported != null) {
             return Ruling.undecided(
-                    unsupported.group().display() + ": " + reason(unsupported),
-                    unsupported,
-                    unsupported.near().source());
+                    reason(unsupported), unsupported, unsupported.near().source());
         }
         Trial nearest = trials.get(0);
         if (nearest.setting().near() == Nearness.DIRECTIVE) {
@@ -236,7 +232,9 @@ final class Arbiter {
     }
 
     private static String reason(SettingCandidate unsupported) {
-        return ((Resolution.Unsupported) unsupported.group()).reason();
+        String group = unsupported.group().display();
+        String reason = ((Resolution.Unsupported) unsupported.group()).reason();
+        return reason.contains(group) ? reason : group + ": " + reason;
     }
 
     /** Two sides joined by equality whose dimensions differ, whether numbers are dimensions or spins. */

@@ -56,11 +56,14 @@ record Case(Statement statement, Ruling ruling, Wording wording) {
         return "missing " + missing + (surplus.isEmpty() ? "" : "; surplus " + surplus);
     }
 
-    /** Replaces the side by what it must be; none if that cannot be written in the author's notation. */
+    /** Replaces the side by what it must be; none if a macro hides it together with another side. */
     List<Fix> replaceSide(Comparison<DominantWeight> comparison) {
         String right = wording.corrected(comparison.expected(), comparison.side());
         Span place = side(comparison.side()).span();
-        if (right.isEmpty()) {
+        boolean shared = statement.sides().stream()
+                .anyMatch(other ->
+                        other != side(comparison.side()) && other.span().overlaps(place));
+        if (right.isEmpty() || shared) {
             return List.of();
         }
         return List.of(new Fix("Replace by " + right, false, List.of(new TextEdit(place, right))));

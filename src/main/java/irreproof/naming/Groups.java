@@ -60,9 +60,16 @@ public final class Groups {
             return family + arguments + factor.suffix() + label;
         }
         String field = factor.suffix().isEmpty() ? "" : "," + factor.suffix();
-        return factor.arguments().isEmpty()
-                ? family + factor.suffix() + label
-                : family + "(" + arguments + field + ")" + label;
+        if (factor.arguments().isEmpty()) {
+            String size = factor.suffix().isEmpty() ? "(n)" : factor.suffix();
+            return family + (isClassical(factor) ? size : factor.suffix()) + label;
+        }
+        return family + "(" + arguments + field + ")" + label;
+    }
+
+    /** One whose size was written as a symbol if it has no arguments. */
+    private static boolean isClassical(Factor factor) {
+        return kind(factor).matches("SU|SL|SO|SPIN|SP|USP|GL");
     }
 
     /** O(n), as against the octahedral groups O and O_h. */

@@ -65,7 +65,7 @@ class GroupsTest {
             delimiter = '|',
             nullValues = "-",
             value = {
-                "SU | -  | - | SU     | SU with a symbol for its size is not judged yet",
+                "SU | -  | - | SU(n)  | SU(n) with a symbol for its size is not judged yet",
                 "SL | 2  | C | SL(2,C)| irreps of SL(2,C) are pairs of spins, and those are not judged yet",
                 "SO | 4  | - | SO(4)  | SO(4) is not simple, and product groups are not judged yet",
                 "SO | 1 3| - | SO(1,3)| SO(1,3) is not simple, and product groups are not judged yet",
