@@ -58,6 +58,42 @@ public interface RepresentationRing<I extends Comparable<? super I>> {
         return result;
     }
 
+    /**
+     * The Adams operation psi^k of an irrep, whose character at g is that of the irrep at g^k, times a sum; by Newton's
+     * formula psi^k = sum of (-1)^(r-1) r (exterior r) (symmetric k-r) where a ring has no quicker way.
+     *
+     * @param power the k, 1 or more
+     */
+    default Decomposition<I> adamsProduct(I irrep, int power, Decomposition<I> factor, Budget budget) {
+        Decomposition<I> operation = Decomposition.zero();
+        for (int r = 1; r <= power; r++) {
+            Decomposition<I> exterior = exteriorPower(irrep, r, budget);
+            Decomposition<I> symmetric = symmetricPower(irrep, power - r, budget);
+            operation = operation.plus(product(exterior, symmetric, budget), r % 2 == 0 ? -r : r);
+        }
+        return product(operation, factor, budget);
+    }
+
+    /** What has the symmetry of a Young diagram among the tensors over a sum, decomposed; see {@link SchurFunctor}. */
+    default Decomposition<I> schurFunctor(Decomposition<I> sum, Partition diagram, Budget budget) {
+        if (sum.isActual() && dimension(sum).compareTo(BigInteger.valueOf(diagram.length())) < 0) {
+            return Decomposition.zero();
+        }
+        SchurFunctor.AdamsProduct<I> adams = (power, factor, allowed) -> {
+            Decomposition<I> total = Decomposition.zero();
+            for (var term : sum.multiplicities().entrySet()) {
+                total = total.plus(adamsProduct(term.getKey(), power, factor, allowed), term.getValue());
+            }
+            return total;
+        };
+        return SchurFunctor.of(adams, trivial(), diagram, budget);
+    }
+
+    /** See {@link #schurFunctor(Decomposition, Partition, Budget)}. */
+    default Decomposition<I> schurFunctor(I irrep, Partition diagram, Budget budget) {
+        return schurFunctor(Decomposition.of(irrep), diagram, budget);
+    }
+
     /** The dimension of a sum. */
     default BigInteger dimension(Decomposition<I> sum) {
         BigInteger total = BigInteger.ZERO;

@@ -1,5 +1,6 @@
 package irreproof.engine.lie;
 
+import irreproof.engine.Partition;
 import java.util.Optional;
 
 /**

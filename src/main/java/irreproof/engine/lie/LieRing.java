@@ -3,14 +3,16 @@ package irreproof.engine.lie;
 import irreproof.budget.Budget;
 import irreproof.engine.BoundedCache;
 import irreproof.engine.Decomposition;
+import irreproof.engine.Partition;
 import irreproof.engine.RepresentationRing;
+import irreproof.engine.SchurFunctor;
 import java.math.BigInteger;
 import java.util.Map;
 import java.util.Optional;
 
 /**
  * The representation ring of a simple Lie algebra. Products of A_n by {@link LittlewoodRichardson}, of the other series
- * by {@link KlimykProduct}; powers by {@link AdamsPowers}. Products, powers and characters are remembered in caches
+ * by {@link KlimykProduct}; powers by {@link SchurFunctor}. Products, powers and characters are remembered in caches
  * shared by all rings and threads.
  *
  * <p>Invariant: an estimate that refuses work is never above the work's true cost, so what a budget allows does not
@@ -109,10 +111,18 @@ public record LieRing(SimpleAlgebra algebra) implements RepresentationRing<Domin
             throw new IllegalArgumentException("negative exponent " + exponent);
         }
         Question.Kind kind = exterior ? Question.Kind.EXTERIOR : Question.Kind.SYMMETRIC;
-        return ANSWERS.get(
-                new Question(kind, algebra, irrep, irrep, exponent),
-                budget,
-                allowed -> AdamsPowers.power(algebra, character(irrep, allowed), exterior, exponent, allowed));
+        return ANSWERS.get(new Question(kind, algebra, irrep, irrep, exponent), budget, allowed -> {
+            // before a diagram of so many boxes is built
+            SchurFunctor.requireBoxes(exponent, allowed);
+            Partition diagram = exterior ? Partition.column(exponent) : Partition.of(exponent);
+            return schurFunctor(Decomposition.of(irrep), diagram, allowed);
+        });
+    }
+
+    @Override
+    public Decomposition<DominantWeight> adamsProduct(
+            DominantWeight irrep, int power, Decomposition<DominantWeight> factor, Budget budget) {
+        return KlimykProduct.scaled(RootSystem.of(algebra), character(irrep, budget), power, factor, budget);
     }
 
     /** The N-ality of SU(N), the congruence class otherwise; empty where the centre is trivial (E8, F4, G2). */

@@ -3,6 +3,7 @@ package irreproof.engine.lie;
 import irreproof.budget.Budget;
 import irreproof.budget.BudgetExceeded;
 import irreproof.engine.Decomposition;
+import irreproof.engine.Partition;
 import java.util.Arrays;
 import java.util.HashMap;
 import java.util.Map;

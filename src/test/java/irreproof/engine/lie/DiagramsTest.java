@@ -3,6 +3,7 @@ package irreproof.engine.lie;
 import static org.junit.jupiter.api.Assertions.assertEquals;
 import static org.junit.jupiter.api.Assertions.assertThrows;
 
+import irreproof.engine.Partition;
 import java.util.Optional;
 import org.junit.jupiter.api.Test;
 

@@ -4,6 +4,7 @@ import static org.junit.jupiter.api.Assertions.assertEquals;
 
 import irreproof.budget.Budget;
 import irreproof.engine.Decomposition;
+import irreproof.engine.Partition;
 import java.util.List;
 import java.util.Map;
 import java.util.stream.Collectors;

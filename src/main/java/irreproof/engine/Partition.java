@@ -1,7 +1,8 @@
-package irreproof.engine.lie;
+package irreproof.engine;
 
 import java.util.ArrayList;
 import java.util.Arrays;
+import java.util.Collections;
 import java.util.List;
 
 /**
@@ -39,6 +40,11 @@ public record Partition(List<Integer> rows) implements Comparable<Partition> {
 
     public static Partition of(int... rows) {
         return new Partition(Arrays.stream(rows).boxed().toList());
+    }
+
+    /** A diagram of one column. */
+    public static Partition column(int boxes) {
+        return new Partition(Collections.nCopies(boxes, 1));
     }
 
     /** The number of rows, which is the length of the first column. */
