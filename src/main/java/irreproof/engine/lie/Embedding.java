@@ -1,6 +1,7 @@
 package irreproof.engine.lie;
 
 import irreproof.engine.Rational;
+import java.util.ArrayList;
 import java.util.List;
 
 /**
@@ -21,5 +22,74 @@ public record Embedding(
             throw new IllegalArgumentException(
                     "the projection of " + algebra + " to " + subalgebra + " has a wrong shape");
         }
+    }
+
+    /** The algebra in itself. */
+    public static Embedding identity(SimpleAlgebra algebra) {
+        List<List<Rational>> rows = new ArrayList<>();
+        for (int i = 0; i < algebra.rank(); i++) {
+            List<Rational> row = new ArrayList<>();
+            for (int j = 0; j < algebra.rank(); j++) {
+                row.add(i == j ? Rational.ONE : Rational.ZERO);
+            }
+            rows.add(row);
+        }
+        return new Embedding(algebra, ReductiveAlgebra.of(algebra), rows, "identity");
+    }
+
+    /** The rows of P that belong to a simple factor of the subalgebra, counted from 0. */
+    public List<List<Rational>> rows(int factor) {
+        int start = 0;
+        for (int i = 0; i < factor; i++) {
+            start += subalgebra.factors().get(i).rank();
+        }
+        return projection.subList(
+                start, start + subalgebra.factors().get(factor).rank());
+    }
+
+    /** The rows of P that give the charges. */
+    public List<List<Rational>> chargeRows() {
+        return projection.subList(projection.size() - subalgebra.charges(), projection.size());
+    }
+
+    /**
+     * The chain through a subalgebra of one simple factor: its factors replace that factor, its charges come after the
+     * present ones.
+     *
+     * @throws IllegalArgumentException if the next embedding is not one into that factor
+     */
+    public Embedding then(int factor, Embedding next) {
+        if (!subalgebra.factors().get(factor).equals(next.algebra)) {
+            throw new IllegalArgumentException(next.name + " is no subalgebra of factor " + factor + " of " + name);
+        }
+        List<SimpleAlgebra> factors = new ArrayList<>();
+        List<List<Rational>> simpleRows = new ArrayList<>();
+        for (int i = 0; i < subalgebra.factors().size(); i++) {
+            if (i == factor) {
+                factors.addAll(next.subalgebra.factors());
+                int simpleRank = next.projection.size() - next.subalgebra.charges();
+                next.projection.subList(0, simpleRank).forEach(row -> simpleRows.add(combination(row, rows(factor))));
+            } else {
+                factors.add(subalgebra.factors().get(i));
+                simpleRows.addAll(rows(i));
+            }
+        }
+        simpleRows.addAll(chargeRows());
+        next.chargeRows().forEach(row -> simpleRows.add(combination(row, rows(factor))));
+        ReductiveAlgebra smaller = new ReductiveAlgebra(factors, subalgebra.charges() + next.subalgebra.charges());
+        return new Embedding(algebra, smaller, simpleRows, name + ", then " + next.name);
+    }
+
+    /** The sum of the rows, each times its coefficient. */
+    private static List<Rational> combination(List<Rational> coefficients, List<List<Rational>> rows) {
+        List<Rational> sum = new ArrayList<>();
+        for (int j = 0; j < rows.get(0).size(); j++) {
+            Rational entry = Rational.ZERO;
+            for (int i = 0; i < rows.size(); i++) {
+                entry = entry.plus(coefficients.get(i).times(rows.get(i).get(j)));
+            }
+            sum.add(entry);
+        }
+        return sum;
     }
 }
