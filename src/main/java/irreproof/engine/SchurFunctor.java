@@ -2,13 +2,16 @@ package irreproof.engine;
 
 import irreproof.budget.Budget;
 import java.math.BigInteger;
-import java.util.Comparator;
+import java.util.ArrayList;
+import java.util.Arrays;
+import java.util.Collections;
 import java.util.HashMap;
+import java.util.HashSet;
+import java.util.List;
 import java.util.Map;
+import java.util.NavigableMap;
 import java.util.Set;
-import java.util.SortedSet;
 import java.util.TreeMap;
-import java.util.TreeSet;
 
 /**
  * The Schur functor of a Young diagram, applied in a representation ring: the tensors with the symmetry of the diagram;
@@ -44,6 +47,7 @@ public final class SchurFunctor<I extends Comparable<? super I>> {
     public static <I extends Comparable<? super I>> Decomposition<I> of(
             AdamsProduct<I> adams, I trivial, Partition diagram, Budget budget) {
         requireBoxes(diagram.size(), budget);
+        budget.require(strips(diagram), "the Schur functor of " + diagram);
         SchurFunctor<I> functor = new SchurFunctor<>(adams, budget);
         functor.values.put(Partition.of(), Decomposition.of(trivial));
         for (Partition smaller : functor.reached(diagram)) {
@@ -57,21 +61,46 @@ public final class SchurFunctor<I extends Comparable<? super I>> {
         budget.require(BigInteger.valueOf(boxes).pow(2).shiftRight(1), "the power " + boxes);
     }
 
+    /**
+     * How many strips all diagrams inside one have together, which is how many boxes: taking single boxes away leads to
+     * each of them. Counted row by row from the bottom, by the length of the row; one step per box.
+     */
+    private static BigInteger strips(Partition diagram) {
+        int longest = diagram.row(0);
+        BigInteger[] counts = new BigInteger[longest + 1];
+        BigInteger[] boxes = new BigInteger[longest + 1];
+        Arrays.fill(counts, BigInteger.ONE);
+        Arrays.fill(boxes, BigInteger.ZERO);
+        for (int row = diagram.length() - 1; row >= 0; row--) {
+            // from "a row of exactly this length here" to "at most this length", for the row above
+            for (int length = 0; length <= longest; length++) {
+                boolean fits = length <= diagram.row(row);
+                BigInteger inRow = counts[length].multiply(BigInteger.valueOf(length));
+                boxes[length] = fits ? boxes[length].add(inRow) : BigInteger.ZERO;
+                counts[length] = fits ? counts[length] : BigInteger.ZERO;
+                if (length > 0) {
+                    boxes[length] = boxes[length].add(boxes[length - 1]);
+                    counts[length] = counts[length].add(counts[length - 1]);
+                }
+            }
+        }
+        return boxes[longest];
+    }
+
     /** The diagrams from the smallest on, without the empty one. */
-    private Set<Partition> reached(Partition diagram) {
-        SortedSet<Partition> open = new TreeSet<>(Comparator.reverseOrder());
-        SortedSet<Partition> found = new TreeSet<>();
-        open.add(diagram);
-        while (!open.isEmpty()) {
-            Partition next = open.first();
-            open.remove(next);
-            if (next.length() > 0) {
+    private List<Partition> reached(Partition diagram) {
+        NavigableMap<Long, Set<Partition>> open = new TreeMap<>(Map.of(diagram.size(), Set.of(diagram)));
+        List<Partition> found = new ArrayList<>();
+        while (open.lastKey() > 0) {
+            for (Partition next : open.pollLastEntry().getValue()) {
                 found.add(next);
                 Map<Integer, Map<Partition, Long>> taken = withoutStrips(next);
                 strips.put(next, taken);
-                taken.values().forEach(rest -> open.addAll(rest.keySet()));
+                taken.forEach((size, rest) -> open.computeIfAbsent(next.size() - size, boxes -> new HashSet<>())
+                        .addAll(rest.keySet()));
             }
         }
+        Collections.reverse(found);
         return found;
     }
 

@@ -2,11 +2,8 @@ package irreproof.engine.lie;
 
 import irreproof.budget.Budget;
 import java.math.BigInteger;
-import java.util.BitSet;
 import java.util.Collections;
-import java.util.HashMap;
 import java.util.LinkedHashMap;
-import java.util.List;
 import java.util.Map;
 import java.util.TreeMap;
 
@@ -24,12 +21,14 @@ public final class DominantCharacter {
     private final DominantWeight highest;
     private final Budget budget;
     private final Map<DominantWeight, Long> multiplicities = new LinkedHashMap<>();
-    private final Map<BitSet, List<RootOrbits.Orbit>> orbits = new HashMap<>();
+    /** The same, for the inner loop. */
+    private final WeightTable table;
 
     private DominantCharacter(RootSystem system, DominantWeight highest, Budget budget) {
         this.system = system;
         this.highest = highest;
         this.budget = budget;
+        this.table = new WeightTable(system.rank());
     }
 
     /** Dominant weights to multiplicities, the highest weight first, lower ones after all above them; unmodifiable. */
@@ -61,7 +60,9 @@ public final class DominantCharacter {
             var layer = layers.pollFirstEntry();
             for (Weight weight : layer.getValue().values()) {
                 budget.spend(system.positiveRoots().size());
-                multiplicities.put(weight.labels, layer.getKey() == 0 ? 1L : multiplicity(weight));
+                long multiplicity = layer.getKey() == 0 ? 1L : multiplicity(weight);
+                multiplicities.put(weight.labels, multiplicity);
+                table.add(weight.labels.labels(), multiplicity);
                 for (Root root : system.positiveRoots()) {
                     if (staysDominant(weight.labels, root)) {
                         Weight lower = minus(weight, root);
@@ -101,7 +102,7 @@ public final class DominantCharacter {
             gap = Math.addExact(gap, term);
         }
         long sum = 0;
-        for (RootOrbits.Orbit orbit : orbitsAt(weight.labels)) {
+        for (RootOrbits.Orbit orbit : system.parabolic(weight.labels).rootOrbits()) {
             sum = Math.addExact(
                     sum, Math.multiplyExact(2L * orbit.count(), above(weight.labels, orbit.representative())));
         }
@@ -110,14 +111,6 @@ public final class DominantCharacter {
                     "Freudenthal's sum for " + weight.labels + " in " + highest + " leaves a rest");
         }
         return sum / gap;
-    }
-
-    private List<RootOrbits.Orbit> orbitsAt(DominantWeight weight) {
-        BitSet zeros = new BitSet();
-        for (int node = 0; node < system.rank(); node++) {
-            zeros.set(node, weight.label(node) == 0);
-        }
-        return orbits.computeIfAbsent(zeros, key -> RootOrbits.under(system, key::get));
     }
 
     /** The sum over the weights above along a root, of multiplicity times the form with the root. */
@@ -129,16 +122,17 @@ public final class DominantCharacter {
         }
         long length = 2L * system.length(root);
         long sum = 0;
+        int[] dominant = new int[labels.length];
         while (true) {
             budget.spend(1);
             for (int node = 0; node < labels.length; node++) {
                 labels[node] = Math.addExact(labels[node], root.label(node));
+                dominant[node] = labels[node];
             }
             form += length;
-            int[] dominant = labels.clone();
             ChamberReflection.toDominant(system, dominant);
-            Long multiplicity = multiplicities.get(DominantWeight.of(dominant));
-            if (multiplicity == null) {
+            long multiplicity = table.count(dominant);
+            if (multiplicity == 0) {
                 return sum;
             }
             sum = Math.addExact(sum, Math.multiplyExact(multiplicity, form));

@@ -3,7 +3,6 @@ package irreproof.engine.lie;
 import irreproof.budget.Budget;
 import irreproof.engine.Decomposition;
 import java.math.BigInteger;
-import java.util.HashMap;
 import java.util.Map;
 
 /**
@@ -63,27 +62,45 @@ public final class KlimykProduct {
         budget.require(
                 weights(system, character).multiply(BigInteger.valueOf(terms)),
                 "a product of irreps of " + system.algebra());
-        Map<DominantWeight, Long> result = new HashMap<>();
+        int[][] highest = new int[terms][];
+        long[] counts = new long[terms];
+        int next = 0;
+        for (var term : sum.multiplicities().entrySet()) {
+            highest[next] = term.getKey().labels();
+            for (int node = 0; node < system.rank(); node++) {
+                highest[next][node] = Math.addExact(highest[next][node], 1);
+            }
+            counts[next++] = term.getValue();
+        }
+        WeightTable result = new WeightTable(system.rank());
         int[] shifted = new int[system.rank()];
         character.forEach((dominant, multiplicity) -> WeylOrbit.forEach(system, dominant, budget, weight -> {
             budget.spend(terms - 1L);
-            for (var term : sum.multiplicities().entrySet()) {
-                DominantWeight highest = term.getKey();
-                for (int node = 0; node < shifted.length; node++) {
-                    int scaled = Math.multiplyExact(factor, weight[node]);
-                    shifted[node] = Math.addExact(Math.addExact(highest.label(node), 1), scaled);
-                }
-                int sign = ChamberReflection.toStrictlyDominant(system, shifted);
-                if (sign != 0) {
-                    for (int node = 0; node < shifted.length; node++) {
-                        shifted[node]--;
+            for (int term = 0; term < terms; term++) {
+                if (shift(highest[term], factor, weight, shifted)) {
+                    int sign = ChamberReflection.toStrictlyDominant(system, shifted);
+                    if (sign != 0) {
+                        result.add(shifted, Math.multiplyExact(Math.multiplyExact(multiplicity, counts[term]), sign));
                     }
-                    long count = Math.multiplyExact(Math.multiplyExact(multiplicity, term.getValue()), sign);
-                    result.merge(DominantWeight.of(shifted), count, Math::addExact);
                 }
             }
         }));
-        return Decomposition.of(result);
+        return result.toDecomposition(-1);
+    }
+
+    /**
+     * Adds so many times a weight to another.
+     *
+     * @return false if the sum lies on the wall of a simple root
+     */
+    private static boolean shift(int[] start, int factor, int[] weight, int[] sum) {
+        for (int node = 0; node < sum.length; node++) {
+            sum[node] = Math.addExact(start[node], Math.multiplyExact(factor, weight[node]));
+            if (sum[node] == 0) {
+                return false;
+            }
+        }
+        return true;
     }
 
     /** The number of different weights of a character. */

@@ -4,6 +4,7 @@ import irreproof.budget.BudgetExceeded;
 import java.math.BigInteger;
 import java.util.ArrayList;
 import java.util.Arrays;
+import java.util.BitSet;
 import java.util.LinkedHashMap;
 import java.util.LinkedHashSet;
 import java.util.List;
@@ -35,6 +36,12 @@ public final class RootSystem {
     private final int[][] neighbours;
     private List<Root> positiveRoots;
     private BigInteger weylGroupOrder;
+    private final Map<BitSet, Parabolic> parabolics = new LinkedHashMap<>(16, 0.75f, true) {
+        @Override
+        protected boolean removeEldestEntry(Map.Entry<BitSet, Parabolic> eldest) {
+            return size() > KEPT;
+        }
+    };
 
     private RootSystem(SimpleAlgebra algebra) {
         this.algebra = algebra;
@@ -189,6 +196,19 @@ public final class RootSystem {
             weylGroupOrder = WeylGroup.order(this, node -> true);
         }
         return weylGroupOrder;
+    }
+
+    /** The stabiliser of a dominant weight in the Weyl group; the most recently used are kept. */
+    Parabolic parabolic(DominantWeight weight) {
+        BitSet zeros = new BitSet();
+        for (int node = 0; node < rank(); node++) {
+            if (weight.label(node) == 0) {
+                zeros.set(node);
+            }
+        }
+        synchronized (parabolics) {
+            return parabolics.computeIfAbsent(zeros, nodes -> new Parabolic(this, nodes));
+        }
     }
 
     private List<Root> findPositiveRoots() {

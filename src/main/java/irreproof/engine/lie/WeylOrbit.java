@@ -2,8 +2,7 @@ package irreproof.engine.lie;
 
 import irreproof.budget.Budget;
 import java.math.BigInteger;
-import java.util.ArrayDeque;
-import java.util.Deque;
+import java.util.Arrays;
 import java.util.function.Consumer;
 
 /**
@@ -17,7 +16,7 @@ public final class WeylOrbit {
     /** The number of weights, without enumerating them: the group's order over the stabiliser's. */
     public static BigInteger size(RootSystem system, DominantWeight weight) {
         system.algebra().requireWeight(weight);
-        return system.weylGroupOrder().divide(WeylGroup.order(system, node -> weight.label(node) == 0));
+        return system.parabolic(weight).orbitSize();
     }
 
     /**
@@ -26,27 +25,38 @@ public final class WeylOrbit {
      */
     public static void forEach(RootSystem system, DominantWeight weight, Budget budget, Consumer<int[]> visitor) {
         budget.require(size(system, weight), "the Weyl orbit of " + weight);
-        Deque<int[]> open = new ArrayDeque<>();
-        open.push(weight.labels());
-        while (!open.isEmpty()) {
+        int[][] open = new int[16][];
+        open[0] = weight.labels();
+        int waiting = 1;
+        int[] labels = new int[system.rank()];
+        while (waiting > 0) {
             budget.spend(1);
-            int[] labels = open.pop();
+            // taken off by exchange: the array that was done with is kept there for a later child
+            int[] next = open[--waiting];
+            open[waiting] = labels;
+            labels = next;
             visitor.accept(labels);
+            int lowest = firstNegative(labels);
             for (int node = 0; node < labels.length; node++) {
-                if (labels[node] > 0) {
-                    int[] child = labels.clone();
-                    system.reflect(child, node);
-                    if (firstNegative(child) == node) {
-                        open.push(child);
+                // beyond the smallest negative node only its neighbours can make it positive
+                if (labels[node] > 0 && (node < lowest || system.cartan(node, lowest) != 0)) {
+                    if (waiting == open.length) {
+                        open = Arrays.copyOf(open, 2 * waiting);
                     }
+                    int[] child = open[waiting] == null ? new int[labels.length] : open[waiting];
+                    System.arraycopy(labels, 0, child, 0, labels.length);
+                    system.reflect(child, node);
+                    open[waiting] = child;
+                    waiting += firstNegative(child) == node ? 1 : 0;
                 }
             }
         }
     }
 
+    /** The number of labels if none is negative. */
     private static int firstNegative(int[] labels) {
         int node = 0;
-        while (labels[node] >= 0) {
+        while (node < labels.length && labels[node] >= 0) {
             node++;
         }
         return node;

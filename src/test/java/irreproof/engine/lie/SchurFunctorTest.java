@@ -249,7 +249,14 @@ class SchurFunctorTest {
         for (Partition diagram :
                 List.of(Partition.of(40, 40, 40, 40), Partition.of(30_000, 7), Partition.column(200))) {
             Budget budget = Budget.of(1_000_000);
-            assertThrows(BudgetExceeded.class, () -> ring.schurFunctor(adjoint, diagram, budget));
+            BudgetExceeded refusal =
+                    assertThrows(BudgetExceeded.class, () -> ring.schurFunctor(adjoint, diagram, budget));
+            assertTrue(refusal.reason() == BudgetExceeded.Cause.TOO_LARGE || diagram.row(0) == 1, diagram::toString);
         }
+        // 135751 diagrams fit into four rows of 40, with 80 boxes on the average
+        BudgetExceeded refusal = assertThrows(
+                BudgetExceeded.class,
+                () -> ring.schurFunctor(adjoint, Partition.of(40, 40, 40, 40), Budget.of(1_000_000)));
+        assertEquals("the Schur functor of [40, 40, 40, 40] is too large (about 10860080 steps)", refusal.getMessage());
     }
 }
