@@ -11,12 +11,12 @@ import java.util.regex.Matcher;
 import java.util.regex.Pattern;
 
 /** Reads {@code published/branchings.tsv}, whose projection matrices act on labels in the order of Slansky's tables. */
-final class PublishedBranchings {
+public final class PublishedBranchings {
     private static final Pattern TERM = Pattern.compile("(?:(\\d+)\\*)?\\[([^\\];]*)(?:;([^\\]]*))?\\]");
     private static final Pattern WEIGHT = Pattern.compile("\\([\\d,]+\\)");
 
     /** One published branching: what it starts from, and what it says. */
-    record Row(
+    public record Row(
             SimpleAlgebra algebra,
             ReductiveAlgebra subalgebra,
             DominantWeight irrep,
@@ -26,7 +26,7 @@ final class PublishedBranchings {
 
     private PublishedBranchings() {}
 
-    static List<Row> rows() {
+    public static List<Row> rows() {
         List<Row> rows = new ArrayList<>();
         for (Map<String, String> cells : Published.rows("branchings.tsv")) {
             SimpleAlgebra algebra = Published.algebra(cells.get("group")).orElseThrow();

@@ -1,0 +1,41 @@
+package irreproof.engine.lie.embedding;
+
+import irreproof.engine.Rational;
+import irreproof.engine.lie.Embedding;
+import irreproof.engine.lie.RootSystem;
+import java.math.BigInteger;
+import java.util.ArrayList;
+import java.util.List;
+
+/**
+ * Dynkin's index of a simple factor in the algebra (Dynkin 1952): the squared length, in the algebra's form, of the coroot
+ * of the factor's highest root, over that of the algebra's own, which is 2. Restricted irreps of the algebra have that
+ * many times their own index.
+ */
+public final class EmbeddingIndex {
+    private EmbeddingIndex() {}
+
+    /** @param factor counted from 0 */
+    public static BigInteger of(Embedding embedding, int factor) {
+        RootSystem system = RootSystem.of(embedding.algebra());
+        RootSystem smaller = RootSystem.of(embedding.subalgebra().factors().get(factor));
+        int[] comarks = RegularEmbeddings.comarks(smaller);
+        List<Rational> coroot = new ArrayList<>();
+        for (int i = 0; i < system.rank(); i++) {
+            Rational coefficient = Rational.ZERO;
+            for (int j = 0; j < comarks.length; j++) {
+                Rational entry = embedding.rows(factor).get(j).get(i);
+                coefficient = coefficient.plus(entry.times(Rational.of(comarks[j])));
+            }
+            coroot.add(coefficient);
+        }
+        Rational square = Rational.ZERO;
+        for (int i = 0; i < system.rank(); i++) {
+            for (int j = 0; j < system.rank(); j++) {
+                Rational form = RegularEmbeddings.corootForm(system, i, j);
+                square = square.plus(form.times(coroot.get(i)).times(coroot.get(j)));
+            }
+        }
+        return square.dividedBy(Rational.of(2)).toIntegerExact();
+    }
+}
