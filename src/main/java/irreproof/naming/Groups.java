@@ -4,6 +4,7 @@ import irreproof.engine.lie.Series;
 import irreproof.notation.GroupName;
 import irreproof.notation.GroupName.Factor;
 import java.math.BigInteger;
+import java.util.ArrayList;
 import java.util.List;
 import java.util.Locale;
 import java.util.Optional;
@@ -19,7 +20,7 @@ import java.util.stream.Collectors;
  */
 public final class Groups {
     /** What the root systems of the engine hold. */
-    private static final int LARGEST_RANK = 128;
+    static final int LARGEST_RANK = 128;
 
     private Groups() {}
 
@@ -32,7 +33,7 @@ public final class Groups {
         if (reason != null) {
             return unsupported(name, reason);
         }
-        Optional<LieGroup> group = simple(factor);
+        Optional<LieGroup> group = simple(factor, SymplecticUsage.SIZE);
         if (group.isEmpty()) {
             return unsupported(name, display(factor, false) + " is not a group known here");
         }
@@ -40,6 +41,35 @@ public final class Groups {
             return unsupported(name, tooLarge(factor));
         }
         return new Resolution.Simple(group.get().displayed(display(factor, false)));
+    }
+
+    /**
+     * Like {@link #resolve}, and products, U(n), SO(4), SO(2), the Lorentz group and O(n) too: {@link FactorParts} says
+     * how. One simple factor gives a {@link Resolution.Simple}, anything else a {@link Resolution.Product}.
+     *
+     * @param usage what the author counts by the n of Sp(n), where the name itself does not tell
+     */
+    public static Resolution resolveFully(GroupName name, SymplecticUsage usage) {
+        List<ProductGroup.Part> parts = new ArrayList<>();
+        ProductGroup.Custom custom = ProductGroup.Custom.SPINS;
+        List<String> displays = new ArrayList<>();
+        for (Factor factor : name.factors()) {
+            FactorParts found = FactorParts.of(factor, usage.with(name));
+            if (found.parts().isEmpty()) {
+                return new Resolution.Unsupported(display(name), found.reason());
+            }
+            parts.addAll(found.parts());
+            custom = found.custom() == ProductGroup.Custom.SPINS ? custom : found.custom();
+            displays.add(
+                    isFullOrthogonal(factor)
+                            ? found.display()
+                            : display(factor, name.factors().size() > 1));
+        }
+        String display = String.join(" x ", displays);
+        if (parts.size() == 1 && parts.get(0) instanceof ProductGroup.Simple simple) {
+            return new Resolution.Simple(simple.group().displayed(display));
+        }
+        return new Resolution.Product(new ProductGroup(display, parts, custom));
     }
 
     /** Plain text: {@code SU(3)_C x SU(2)_L x U(1)_Y}, {@code so(1,9)}, {@code E6}, {@code D3h}. */
@@ -51,7 +81,7 @@ public final class Groups {
         return new Resolution.Unsupported(display(name), reason);
     }
 
-    private static String display(Factor factor, boolean asWritten) {
+    static String display(Factor factor, boolean asWritten) {
         String family = asWritten && factor.algebra() ? kind(factor).toLowerCase(Locale.ROOT) : factor.family();
         String arguments = factor.arguments().stream().map(String::valueOf).collect(Collectors.joining(","));
         String label = asWritten && !factor.label().isEmpty() ? "_" + factor.label() : "";
@@ -73,12 +103,12 @@ public final class Groups {
     }
 
     /** O(n), as against the octahedral groups O and O_h. */
-    private static boolean isFullOrthogonal(Factor factor) {
+    static boolean isFullOrthogonal(Factor factor) {
         return factor.family().equals("O") && !factor.arguments().isEmpty();
     }
 
     /** Why statements about the factor are not judged; null if they may be. */
-    private static String whyNot(Factor factor) {
+    static String whyNot(Factor factor) {
         String shown = display(factor, false);
         List<Integer> arguments = factor.arguments();
         switch (kind(factor)) {
@@ -112,26 +142,36 @@ public final class Groups {
         if (isOrthogonal(factor) && size.equals(BigInteger.TWO)) {
             return shown + " is abelian, and charges are not judged yet";
         }
-        return size.compareTo(BigInteger.valueOf(2 * LARGEST_RANK)) > 0 ? tooLarge(factor) : null;
+        return isTooLarge(factor) ? tooLarge(factor) : null;
     }
 
-    private static String tooLarge(Factor factor) {
+    /** True if the numbers alone say so; those that pass can still be a little too large. */
+    static boolean isTooLarge(Factor factor) {
+        return size(factor.arguments()).compareTo(BigInteger.valueOf(2 * LARGEST_RANK)) > 0;
+    }
+
+    /** False for the letters of finite and point groups. */
+    static boolean isLieFamily(Factor factor) {
+        return isClassical(factor) || kind(factor).matches("[UEFG]") || isFullOrthogonal(factor);
+    }
+
+    static String tooLarge(Factor factor) {
         return display(factor, false) + " has a rank above " + LARGEST_RANK + ", larger than the groups judged here";
     }
 
-    private static String kind(Factor factor) {
+    static String kind(Factor factor) {
         return factor.family().toUpperCase(Locale.ROOT);
     }
 
-    private static boolean isOrthogonal(Factor factor) {
+    static boolean isOrthogonal(Factor factor) {
         return kind(factor).equals("SO") || kind(factor).equals("SPIN");
     }
 
-    private static BigInteger size(List<Integer> arguments) {
+    static BigInteger size(List<Integer> arguments) {
         return arguments.stream().map(BigInteger::valueOf).reduce(BigInteger.ZERO, BigInteger::add);
     }
 
-    private static Optional<LieGroup> simple(Factor factor) {
+    static Optional<LieGroup> simple(Factor factor, SymplecticUsage usage) {
         List<Integer> arguments = factor.arguments();
         boolean readable = arguments.size() == 1 || arguments.size() == 2;
         if (!readable || arguments.stream().anyMatch(part -> part < 0)) {
@@ -142,7 +182,7 @@ public final class Groups {
             case "SU", "SL" -> size < 2 ? Optional.empty() : Optional.of(LieGroup.su(special(factor, size)));
             case "SO", "SPIN" -> size < 3 ? Optional.empty() : Optional.of(LieGroup.so(size));
             case "SP" -> {
-                boolean countsRank = size % 2 != 0 || arguments.size() == 2;
+                boolean countsRank = usage == SymplecticUsage.RANK || size % 2 != 0 || arguments.size() == 2;
                 yield size < 1 ? Optional.empty() : Optional.of(LieGroup.sp(countsRank ? 2 * size : size));
             }
             case "USP" -> size < 2 || size % 2 != 0 ? Optional.empty() : Optional.of(LieGroup.sp(size));

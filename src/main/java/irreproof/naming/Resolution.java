@@ -13,6 +13,14 @@ public sealed interface Resolution {
         }
     }
 
+    /** A product of simple groups and U(1)s; only {@link Groups#resolveFully} finds these. */
+    record Product(ProductGroup group) implements Resolution {
+        @Override
+        public String display() {
+            return group.display();
+        }
+    }
+
     /** @param reason why statements about it stay undecided, as the user should read it */
     record Unsupported(String display, String reason) implements Resolution {}
 }
