@@ -15,6 +15,7 @@ public final class AuthorStyle {
             ListStyle.STANDARD,
             DiagramStyle.STANDARD,
             SpinStyle.STANDARD,
+            Tuples.STANDARD,
             SumStyle.STANDARD);
 
     private final Map<WrittenName, String> known;
@@ -22,7 +23,13 @@ public final class AuthorStyle {
     private final ListStyle lists;
     private final DiagramStyle diagrams;
     private final SpinStyle spins;
+    private final Tuples tuples;
     private final SumStyle sums;
+
+    /** How tuples are written, with a style of their own for the entries. */
+    record Tuples(TupleStyle style, NameStyle names, SpinStyle spins) {
+        static final Tuples STANDARD = new Tuples(TupleStyle.STANDARD, NameStyle.STANDARD, SpinStyle.STANDARD);
+    }
 
     /** @param known names the author has written, as written: these are used again letter by letter */
     AuthorStyle(
@@ -31,12 +38,14 @@ public final class AuthorStyle {
             ListStyle lists,
             DiagramStyle diagrams,
             SpinStyle spins,
+            Tuples tuples,
             SumStyle sums) {
         this.known = Map.copyOf(known);
         this.names = names;
         this.lists = lists;
         this.diagrams = diagrams;
         this.spins = spins;
+        this.tuples = tuples;
         this.sums = sums;
     }
 
@@ -65,9 +74,19 @@ public final class AuthorStyle {
         if (name instanceof WrittenTerm.Labels labels) {
             return lists.write(labels.labels());
         }
+        if (name instanceof WrittenTerm.Tuple tuple) {
+            return tuples.style().write(tuple, this::entry);
+        }
         return name instanceof WrittenTerm.Diagram diagram
                 ? diagrams.write(diagram.rows())
                 : spins.write(((WrittenTerm.Spin) name).doubled());
+    }
+
+    private String entry(WrittenName name) {
+        if (name instanceof WrittenTerm.Dimension dimension) {
+            return tuples.names().write(dimension);
+        }
+        return name instanceof WrittenTerm.Spin spin ? tuples.spins().write(spin.doubled()) : write(name);
     }
 
     /** True if a count in front of this name cannot be taken for a name itself. */

@@ -31,6 +31,7 @@ final class StyleLearner {
     private final List<Sample> spins = new ArrayList<>();
     private final List<ListName> lists = new ArrayList<>();
     private final List<DiagramName> diagrams = new ArrayList<>();
+    private final TupleLearner tuples;
     private String sumSign;
     private String productGap;
     private String counting;
@@ -39,6 +40,7 @@ final class StyleLearner {
 
     StyleLearner(String source) {
         this.source = source;
+        this.tuples = new TupleLearner(source);
     }
 
     /** A number as it stands in the source. */
@@ -58,7 +60,19 @@ final class StyleLearner {
                 counting != null,
                 repeats);
         return new AuthorStyle(
-                known, NameLearner.learn(numbers), lists(), diagrams(), SpinLearner.learn(spins, numbers), sums);
+                known,
+                NameLearner.learn(numbers),
+                lists(),
+                diagrams(),
+                SpinLearner.learn(spins, numbers),
+                tuples(),
+                sums);
+    }
+
+    private AuthorStyle.Tuples tuples() {
+        List<Sample> names = tuples.numbers().isEmpty() ? numbers : tuples.numbers();
+        return new AuthorStyle.Tuples(
+                tuples.style(), NameLearner.learn(names), SpinLearner.learn(tuples.spins(), tuples.numbers()));
     }
 
     private void visit(Expression tree) {
@@ -148,6 +162,7 @@ final class StyleLearner {
         if (text.isEmpty() || !oneLine) {
             return;
         }
+        tuples.look(name);
         WrittenName key = key(name);
         if (key != null && (first || fits(name, text))) {
             known.putIfAbsent(key, text);

@@ -61,4 +61,17 @@ public record WrittenTerm(BigInteger count, WrittenName name) {
      * @param doubled twice the spin
      */
     public record Spin(int doubled) implements WrittenName {}
+
+    /**
+     * An irrep of a product group, or one with charges.
+     *
+     * @param entries a name for each simple factor
+     * @param charges a number for each U(1) as plain text: {@code -1/3}
+     */
+    public record Tuple(List<WrittenName> entries, List<String> charges) implements WrittenName {
+        public Tuple {
+            entries = List.copyOf(entries);
+            charges = List.copyOf(charges);
+        }
+    }
 }
