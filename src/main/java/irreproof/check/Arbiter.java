@@ -27,6 +27,9 @@ import java.util.Optional;
  * the statement's group. Where another group that the text does not name would make it true, it is undecided.
  */
 final class Arbiter {
+    /** For each of many small groups: enough for what papers leave without a group. */
+    private static final long INFERENCE_STEPS = 200_000;
+
     private final DeclaredNames names;
     private final Budget budget;
     private final long stepsPerStatement;
@@ -141,8 +144,8 @@ final class Arbiter {
                 || near == Nearness.DOCUMENT
                 || !declared && !failed.judgement().unknownNames().isEmpty();
         if (weak) {
-            Optional<Trial> other =
-                    Inference.firstThatHolds(group -> judge(statement, null, group), Trial::holdsAsUsual);
+            Optional<Trial> other = Inference.firstThatHolds(
+                    group -> judge(statement, null, group, INFERENCE_STEPS), Trial::holdsAsUsual);
             if (other.isPresent()) {
                 return settled(
                         failed,
@@ -167,8 +170,8 @@ final class Arbiter {
         if (nearest.setting().near() == Nearness.DIRECTIVE) {
             return settled(nearest, Verdict.FAILS, "");
         }
-        Optional<Trial> inferred =
-                Inference.onlyOneThatHolds(group -> judge(statement, null, group), Trial::holdsAsUsual);
+        Optional<Trial> inferred = Inference.onlyOneThatHolds(
+                group -> judge(statement, null, group, INFERENCE_STEPS), Trial::holdsAsUsual);
         if (inferred.isPresent()) {
             return settled(inferred.get(), Verdict.HOLDS, "");
         }
@@ -184,7 +187,7 @@ final class Arbiter {
         if (dimensions.isPresent()) {
             return differs(dimensions.get());
         }
-        return Inference.onlyOneThatHolds(group -> judge(statement, null, group), Trial::holdsAsUsual)
+        return Inference.onlyOneThatHolds(group -> judge(statement, null, group, INFERENCE_STEPS), Trial::holdsAsUsual)
                 .map(trial -> settled(trial, Verdict.HOLDS, ""))
                 .orElseGet(() -> Ruling.undecided("no group is named", null, SettingSource.NONE));
     }
@@ -216,8 +219,12 @@ final class Arbiter {
     }
 
     private Trial judge(Statement statement, SettingCandidate setting, Resolution.Simple group) {
+        return judge(statement, setting, group, stepsPerStatement);
+    }
+
+    private Trial judge(Statement statement, SettingCandidate setting, Resolution.Simple group, long steps) {
         LieLexicon lexicon = new LieLexicon(group.group(), names);
-        return new Trial(setting, lexicon, Judge.judge(statement, lexicon, budget.withSteps(stepsPerStatement)));
+        return new Trial(setting, lexicon, Judge.judge(statement, lexicon, budget.withSteps(steps)));
     }
 
     private static Ruling settled(Trial trial, Verdict verdict, String reason) {

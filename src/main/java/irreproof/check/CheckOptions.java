@@ -15,7 +15,7 @@ public record CheckOptions(String defaultGroup, SourceProvider sources, long ste
     }
 
     /** Enough for every product that is common in papers; about a second of work. */
-    public static final long DEFAULT_STEPS = 50_000_000;
+    public static final long DEFAULT_STEPS = 10_000_000;
 
     public static CheckOptions plain() {
         return new CheckOptions("", SourceProvider.none(), DEFAULT_STEPS);

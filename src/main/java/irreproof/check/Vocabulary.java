@@ -102,7 +102,7 @@ final class Vocabulary {
             case DYNKIN_SLANSKY -> new WrittenTerm.Labels(DynkinNumbering.inSlanskysOrder(lexicon.group(), irrep));
             case PARTITION_ROWS -> new WrittenTerm.Labels(diagram(irrep));
             case PARTITION_COLUMNS -> new WrittenTerm.Labels(columns(diagram(irrep)));
-            case TENSOR_RANK -> dimension(irrep);
+            case TENSOR_RANK, GROUPED -> dimension(irrep);
         };
     }
 

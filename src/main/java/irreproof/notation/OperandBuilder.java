@@ -1,5 +1,6 @@
 package irreproof.notation;
 
+import irreproof.notation.Expression.Bracket;
 import irreproof.notation.Expression.Conjugate;
 import irreproof.notation.Expression.Decoration;
 import irreproof.notation.Expression.DiagramName;
@@ -44,11 +45,23 @@ final class OperandBuilder {
         for (MarkContext mark : innermost.mark()) {
             tree = marked(tree, SumBuilder.lexeme(mark));
         }
+        if (!prefixes.isEmpty()) {
+            tree = argument(tree);
+        }
         for (int i = prefixes.size() - 1; i >= 0; i--) {
             Lexeme prefix = prefixes.get(i);
             tree = power(tree, prefix, prefix.span().cover(tree.span()));
         }
         return tree;
+    }
+
+    /** In {@code S^2(248)} the brackets hold what the power is taken of; they are no list of one label. */
+    private static Expression argument(Expression tree) {
+        boolean brackets = tree instanceof ListName list
+                && list.bracket() == Bracket.ROUND
+                && list.entries().size() == 1
+                && list.decoration().isEmpty();
+        return brackets ? Trees.at(((ListName) tree).entries().get(0), tree.span()) : tree;
     }
 
     private Expression atom(AtomContext context) {

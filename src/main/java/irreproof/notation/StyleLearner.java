@@ -157,7 +157,7 @@ final class StyleLearner {
     }
 
     private void name(Name name) {
-        String text = name.span().of(source);
+        String text = withoutBrackets(name, name.span().of(source));
         boolean oneLine = text.indexOf('\n') < 0 && text.indexOf('%') < 0 && text.indexOf('&') < 0;
         if (text.isEmpty() || !oneLine) {
             return;
@@ -174,6 +174,15 @@ final class StyleLearner {
         } else if (name instanceof DiagramName diagram) {
             diagrams.add(diagram);
         }
+    }
+
+    /** A number may stand in brackets for nothing; how else they could be part of a number's name is not learnt. */
+    private static String withoutBrackets(Name name, String text) {
+        if (!(name instanceof NumberName) || !text.contains("(")) {
+            return text;
+        }
+        boolean around = text.startsWith("(") && text.endsWith(")") && text.indexOf('(', 1) < 0;
+        return around ? text.substring(1, text.length() - 1).strip() : "";
     }
 
     /**

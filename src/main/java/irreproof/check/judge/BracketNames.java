@@ -56,6 +56,12 @@ final class BracketNames {
         return numbers;
     }
 
+    /** The only entry of round brackets, which may stand there for nothing. */
+    static Optional<NumberName> grouped(ListName list) {
+        boolean single = list.bracket() == Bracket.ROUND && list.entries().size() == 1;
+        return single && list.entries().get(0) instanceof NumberName number ? Optional.of(number) : Optional.empty();
+    }
+
     /** What tells the list from others: (01) and (1) differ. */
     static String text(ListName list) {
         return list.bracket() + " " + numbers(list) + " " + list.entries().size() + " "
@@ -75,6 +81,7 @@ final class BracketNames {
             case DYNKIN_SLANSKY -> powers ? Optional.empty() : dynkin(labels(list, numbers, group), true, group);
             case PARTITION_ROWS -> square || powers ? diagram(numbers, group) : Optional.empty();
             case PARTITION_COLUMNS -> square ? columns(numbers, group) : Optional.empty();
+            case GROUPED -> Optional.empty();
             case TENSOR_RANK -> powers ? Optional.empty() : TensorRanks.value(list, numbers, group);
         };
     }

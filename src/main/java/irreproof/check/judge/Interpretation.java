@@ -16,7 +16,9 @@ public record Interpretation(Numbers numbers, Lists lists, Diagrams diagrams) {
         PARTITION_ROWS,
         PARTITION_COLUMNS,
         /** The rank of an antisymmetric or traceless symmetric tensor of SO(n). */
-        TENSOR_RANK
+        TENSOR_RANK,
+        /** Brackets around one name, for nothing. */
+        GROUPED
     }
 
     /** What a box of a Young diagram stands for. */

@@ -130,7 +130,10 @@ public final class Judge<I extends Comparable<? super I>> {
         }
         List<Name> known =
                 names.stream().filter(name -> !unknown.contains(name)).toList();
-        Reading<I> reading = readings.of(known).all(1).get(0);
+        Reading<I> reading = readings.of(known).all(1).stream().findFirst().orElse(null);
+        if (reading == null) {
+            return Judgement.undecided("its names cannot be told apart");
+        }
         Decomposition<I> expected = new Evaluator<>(lexicon, reading, budget).value(deciding);
         List<Comparison<I>> comparisons = links.stream()
                 .filter(link -> link.isEquation() && link.against() == reference)

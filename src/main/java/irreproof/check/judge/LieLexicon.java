@@ -96,7 +96,9 @@ public final class LieLexicon implements Lexicon<DominantWeight> {
         for (Name name : names) {
             if (name instanceof ListName list) {
                 any = true;
-                senses.removeIf(sense -> BracketNames.value(list, sense, group).isEmpty());
+                senses.removeIf(sense -> sense == Lists.GROUPED
+                        ? BracketNames.grouped(list).isEmpty()
+                        : BracketNames.value(list, sense, group).isEmpty());
                 if (!list.decoration().charges().isEmpty() || BracketNames.isTuple(list)) {
                     throw new Undecidable("irreps of product groups and charges are not judged yet");
                 }
@@ -131,6 +133,9 @@ public final class LieLexicon implements Lexicon<DominantWeight> {
             int primes = number.decoration().primes();
             return new NameKey(spin ? "" : dimension, primes, dimension + "'".repeat(primes) + suffix(number));
         }
+        if (name instanceof ListName list && interpretation.lists() == Lists.GROUPED) {
+            return key(BracketNames.grouped(list).orElseThrow(), interpretation);
+        }
         if (name instanceof ListName list) {
             return new NameKey("", 0, BracketNames.text(list));
         }
@@ -146,6 +151,9 @@ public final class LieLexicon implements Lexicon<DominantWeight> {
     public List<Candidate<DominantWeight>> candidates(Name name, Interpretation interpretation, Budget budget) {
         if (name instanceof NumberName number) {
             return interpretation.numbers() == Numbers.SPIN ? spin(number) : dimension(number, budget);
+        }
+        if (name instanceof ListName list && interpretation.lists() == Lists.GROUPED) {
+            return candidates(BracketNames.grouped(list).orElseThrow(), interpretation, budget);
         }
         Optional<Decomposition<DominantWeight>> value = name instanceof ListName list
                 ? BracketNames.value(list, interpretation.lists(), group)
@@ -210,6 +218,16 @@ public final class LieLexicon implements Lexicon<DominantWeight> {
             case "a" -> Symmetry.ANTISYMMETRIC;
             default -> null;
         };
+    }
+
+    @Override
+    public boolean isBarred(Name name) {
+        int inner = name instanceof ListName list
+                ? BracketNames.grouped(list)
+                        .map(entry -> entry.decoration().bars())
+                        .orElse(0)
+                : 0;
+        return (name.decoration().bars() + inner) % 2 == 1;
     }
 
     /** The dimension of an irrep, exactly. */
