@@ -1,6 +1,7 @@
 package irreproof.engine.lie;
 
 import irreproof.budget.Budget;
+import irreproof.engine.Partition;
 import java.math.BigInteger;
 import java.util.Collections;
 import java.util.LinkedHashMap;
@@ -17,6 +18,9 @@ import java.util.TreeMap;
  * 64 bits, or whose sums do not, throw {@link ArithmeticException}. Rank limit as in {@link RootSystem}.
  */
 public final class DominantCharacter {
+    /** Smaller diagrams dominate a few thousand at most. */
+    private static final int FEWEST_BOXES = 30;
+
     private final RootSystem system;
     private final DominantWeight highest;
     private final Budget budget;
@@ -41,13 +45,34 @@ public final class DominantCharacter {
         return Collections.unmodifiableMap(character.multiplicities);
     }
 
-    /** Subtracting each simple root up to half its label stays dominant: that many weights at least, times the roots. */
+    /** A lower bound on the dominant weights, times the roots. */
     private static BigInteger leastSteps(SimpleAlgebra algebra, DominantWeight highest) {
+        // subtracting each simple root up to half its label stays dominant
         BigInteger weights = BigInteger.ONE;
         for (int node = 0; node < highest.rank(); node++) {
             weights = weights.multiply(BigInteger.valueOf(1 + highest.label(node) / 2));
         }
+        weights = weights.max(BigInteger.valueOf(dominatedDiagrams(algebra, highest)));
         return weights.multiply(BigInteger.valueOf((algebra.dimension() - algebra.rank()) / 2));
+    }
+
+    /** Of the classical algebras, the weights that differ by roots e_i - e_j; 1 where too few or too many to count. */
+    private static long dominatedDiagrams(SimpleAlgebra algebra, DominantWeight highest) {
+        return switch (algebra.series()) {
+            case A, B, C, D -> {
+                long[] coordinates = OrthogonalCoordinates.of(algebra, highest, 0);
+                int[] rows = new int[coordinates.length];
+                long boxes = 0;
+                for (int i = 0; i < rows.length; i++) {
+                    // a spinor's halves, and the sign in D_n, are the same for all these weights
+                    rows[i] = (int) Math.min(Integer.MAX_VALUE, Math.abs(coordinates[i]) / 2);
+                    boxes += rows[i];
+                }
+                boolean counted = boxes >= FEWEST_BOXES && boxes <= DominatedDiagrams.MOST_BOXES;
+                yield counted ? DominatedDiagrams.count(Partition.of(rows), rows.length) : 1;
+            }
+            case E, F, G -> 1;
+        };
     }
 
     /** @param depth the highest weight minus this one, over the simple roots */

@@ -14,7 +14,7 @@ import java.util.Map;
  * the right and down no i+1 ever leads. The rule ties each strip only to the one before it, so strips that lead to the
  * same shape with the same last strip are counted together.
  *
- * <p>Cost: one step per row looked at while placing strips; independent of the dimensions, hence fit for large N. Of the
+ * <p>Cost: one step per row looked at while placing strips, and for each row of a shape kept; independent of the dimensions, hence fit for large N. Of the
  * two factors and their conjugates the one with the fewest boxes is added. At most 1000 rows in all. A multiplicity beyond 64 bits throws
  * {@link ArithmeticException}.
  */
@@ -45,12 +45,28 @@ public final class LittlewoodRichardson {
         Partition first = Diagrams.partition(dual ? leftDual : left);
         Partition second = Diagrams.partition(dual ? rightDual : right);
         int degree = left.rank() + 1;
+        Map<Partition, Long> diagrams;
+        try {
+            diagrams = multiply(first, second, degree, budget);
+        } catch (BudgetExceeded stopped) {
+            throw stopped.reason() == BudgetExceeded.Cause.STEPS ? tooLarge(first, second, degree, stopped) : stopped;
+        }
         Map<DominantWeight, Long> terms = new HashMap<>();
-        multiply(first, second, degree, budget).forEach((diagram, count) -> {
+        diagrams.forEach((diagram, count) -> {
             DominantWeight weight = Diagrams.weight(degree, diagram).orElseThrow();
             terms.put(dual ? Conjugation.conjugate(algebra, weight) : weight, count);
         });
         return Decomposition.of(terms);
+    }
+
+    /** The steps cannot be foretold, but a lower bound on the irreps can be told afterwards. */
+    private static BudgetExceeded tooLarge(Partition first, Partition second, int degree, BudgetExceeded stopped) {
+        String size = first.length() + second.length() > degree
+                ? ""
+                : "; it has at least " + HookLengths.leastTerms(first, second) + " irreps, counted with multiplicity";
+        return new BudgetExceeded(
+                BudgetExceeded.Cause.TOO_LARGE,
+                "the product " + first + " x " + second + " is too large (" + stopped.getMessage() + size + ")");
     }
 
     private static long boxes(DominantWeight weight) {
@@ -106,7 +122,8 @@ public final class LittlewoodRichardson {
         State(int[] shape, int[] strip) {
             this.shape = shape;
             this.strip = strip;
-            this.hash = 31 * Arrays.hashCode(shape) + Arrays.hashCode(strip);
+            // a multiplier of its own: by 31 a box more in a shape could balance one less in the strip
+            this.hash = 0x9E3779B9 * Arrays.hashCode(shape) + Arrays.hashCode(strip);
         }
 
         @Override
@@ -171,6 +188,8 @@ public final class LittlewoodRichardson {
         }
 
         private void finish() {
+            // a state to keep
+            budget.spend(2L * rows);
             int[] newShape = new int[rows];
             for (int row = 0; row < rows; row++) {
                 newShape[row] = Math.addExact(shape[row], placed[row]);
