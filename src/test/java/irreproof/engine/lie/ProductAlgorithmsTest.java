@@ -13,11 +13,14 @@ import org.junit.jupiter.api.Test;
 /** Products by two algorithms each. */
 class ProductAlgorithmsTest {
     private static final Budget UNLIMITED = Budget.unlimited();
+    /** {@code mvn test -Dtest=ProductAlgorithmsTest -Dirreproof.long=true} for the full counts. */
+    private static final boolean LONG = Boolean.getBoolean("irreproof.long");
 
     @Test
     void klimykAgreesWithLittlewoodRichardson() {
         RandomIrreps random = new RandomIrreps(20260103, "klimykAgreesWithLittlewoodRichardson");
-        for (int i = 0; i < 1000; i++) {
+        int products = LONG ? 10_000 : 1_000;
+        for (int i = 0; i < products; i++) {
             SimpleAlgebra algebra = new SimpleAlgebra(Series.A, 1 + random.below(8));
             DominantWeight left = random.next(algebra, 3_000);
             DominantWeight right = random.next(algebra, 100_000);
@@ -26,6 +29,7 @@ class ProductAlgorithmsTest {
                     LittlewoodRichardson.product(left, right, UNLIMITED),
                     () -> algebra + ": " + left + " x " + right);
         }
+        System.out.println("Klimyk and Littlewood-Richardson agree on " + products + " products");
     }
 
     @Test
@@ -34,7 +38,8 @@ class ProductAlgorithmsTest {
         List<SimpleAlgebra> algebras = Algebras.upToRank(6).stream()
                 .filter(algebra -> algebra.series() != Series.A)
                 .toList();
-        for (int i = 0; i < 300; i++) {
+        int products = LONG ? 10_000 : 300;
+        for (int i = 0; i < products; i++) {
             SimpleAlgebra algebra = algebras.get(i % algebras.size());
             DominantWeight left = random.next(algebra, 400);
             DominantWeight right = random.next(algebra, 400);
@@ -43,6 +48,7 @@ class ProductAlgorithmsTest {
                     KlimykProduct.product(algebra, left, right, UNLIMITED),
                     () -> algebra + ": " + left + " x " + right);
         }
+        System.out.println("Klimyk and characters agree on " + products + " products");
     }
 
     /** Macdonald, Symmetric Functions and Hall Polynomials, I.9 (from memory): s_21 squared. */
