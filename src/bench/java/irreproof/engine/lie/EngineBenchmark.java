@@ -4,6 +4,8 @@ import irreproof.budget.Budget;
 import irreproof.engine.Decomposition;
 import irreproof.engine.Partition;
 import irreproof.engine.SchurFunctor;
+import irreproof.engine.lie.embedding.RegularEmbeddings;
+import java.util.List;
 import java.util.concurrent.TimeUnit;
 import org.openjdk.jmh.annotations.Benchmark;
 import org.openjdk.jmh.annotations.BenchmarkMode;
@@ -28,6 +30,11 @@ public class EngineBenchmark {
     private static final SimpleAlgebra E6 = new SimpleAlgebra(Series.E, 6);
     private static final SimpleAlgebra E7 = new SimpleAlgebra(Series.E, 7);
     private static final SimpleAlgebra E8 = new SimpleAlgebra(Series.E, 8);
+
+    private final Embedding e8ToSu3AndE6 = RegularEmbeddings.maximal(E8).stream()
+            .filter(embedding -> embedding.subalgebra().factors().containsAll(List.of(SU3, E6)))
+            .findFirst()
+            .orElseThrow();
 
     @Benchmark
     public Decomposition<DominantWeight> su3Product27By27() {
@@ -62,6 +69,12 @@ public class EngineBenchmark {
     @Benchmark
     public Decomposition<DominantWeight> e7ThirdExteriorPowerOf133() {
         return power(E7, DominantWeight.of(1, 0, 0, 0, 0, 0, 0), Partition.column(3));
+    }
+
+    /** The character of the irrep alone is remembered here. */
+    @Benchmark
+    public Decomposition<ReductiveIrrep> e8Branching3875ToSu3AndE6() {
+        return Branching.branch(e8ToSu3AndE6, DominantWeight.of(1, 0, 0, 0, 0, 0, 0, 0), Budget.unlimited());
     }
 
     private static Decomposition<DominantWeight> klimyk(
