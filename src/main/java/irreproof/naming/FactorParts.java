@@ -1,7 +1,7 @@
 package irreproof.naming;
 
 import irreproof.naming.ProductGroup.Charge;
-import irreproof.naming.ProductGroup.Custom;
+import irreproof.naming.ProductGroup.Entries;
 import irreproof.naming.ProductGroup.Part;
 import irreproof.naming.ProductGroup.Simple;
 import irreproof.notation.GroupName.Factor;
@@ -14,10 +14,10 @@ import java.util.List;
  *
  * @param display the factor as printed in messages
  * @param parts none if the factor is not a Lie group known here
- * @param custom how its irreps are usually named
+ * @param entries how its irreps are usually named
  * @param reason why there are no parts; empty otherwise
  */
-record FactorParts(String display, List<Part> parts, Custom custom, String reason) {
+record FactorParts(String display, List<Part> parts, Entries entries, String reason) {
     static FactorParts of(Factor factor, SymplecticUsage usage) {
         String shown = Groups.display(factor, false);
         if (!Groups.isLieFamily(factor)) {
@@ -37,7 +37,7 @@ record FactorParts(String display, List<Part> parts, Custom custom, String reaso
         boolean lorentz = Groups.kind(factor).equals("SL") && factor.suffix().equals("C") && size == 2
                 || Groups.kind(factor).equals("SO") && isLorentz(factor.arguments());
         if (lorentz) {
-            return new FactorParts(shown, twoSpins(), Custom.SPINS, "");
+            return new FactorParts(shown, twoSpins(), Entries.SPINS, "");
         }
         if (Groups.isOrthogonal(factor) && size == 4) {
             return some(shown, twoSpins());
@@ -75,7 +75,10 @@ record FactorParts(String display, List<Part> parts, Custom custom, String reaso
         Factor connected = new Factor("SO", factor.arguments(), factor.suffix(), factor.label(), factor.algebra());
         FactorParts parts = of(connected, usage);
         return new FactorParts(
-                shown + ", read as " + Groups.display(connected, false), parts.parts(), parts.custom(), parts.reason());
+                shown + ", read as " + Groups.display(connected, false),
+                parts.parts(),
+                parts.entries(),
+                parts.reason());
     }
 
     private static boolean isLorentz(List<Integer> arguments) {
@@ -87,10 +90,10 @@ record FactorParts(String display, List<Part> parts, Custom custom, String reaso
     }
 
     private static FactorParts some(String shown, List<Part> parts) {
-        return new FactorParts(shown, parts, Custom.DIMENSIONS, "");
+        return new FactorParts(shown, parts, Entries.DIMENSIONS, "");
     }
 
     private static FactorParts none(String shown, String reason) {
-        return new FactorParts(shown, List.of(), Custom.DIMENSIONS, reason);
+        return new FactorParts(shown, List.of(), Entries.DIMENSIONS, reason);
     }
 }

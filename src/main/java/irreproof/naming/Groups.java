@@ -51,7 +51,7 @@ public final class Groups {
      */
     public static Resolution resolveFully(GroupName name, SymplecticUsage usage) {
         List<ProductGroup.Part> parts = new ArrayList<>();
-        ProductGroup.Custom custom = ProductGroup.Custom.SPINS;
+        ProductGroup.Entries entries = ProductGroup.Entries.SPINS;
         List<String> displays = new ArrayList<>();
         for (Factor factor : name.factors()) {
             FactorParts found = FactorParts.of(factor, usage.with(name));
@@ -59,7 +59,7 @@ public final class Groups {
                 return new Resolution.Unsupported(display(name), found.reason());
             }
             parts.addAll(found.parts());
-            custom = found.custom() == ProductGroup.Custom.SPINS ? custom : found.custom();
+            entries = found.entries() == ProductGroup.Entries.SPINS ? entries : found.entries();
             displays.add(
                     isFullOrthogonal(factor)
                             ? found.display()
@@ -69,7 +69,7 @@ public final class Groups {
         if (parts.size() == 1 && parts.get(0) instanceof ProductGroup.Simple simple) {
             return new Resolution.Simple(simple.group().displayed(display));
         }
-        return new Resolution.Product(new ProductGroup(display, parts, custom));
+        return new Resolution.Product(new ProductGroup(display, parts, entries));
     }
 
     /** Plain text: {@code SU(3)_C x SU(2)_L x U(1)_Y}, {@code so(1,9)}, {@code E6}, {@code D3h}. */

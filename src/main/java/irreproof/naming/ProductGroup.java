@@ -6,13 +6,13 @@ import java.util.List;
 import java.util.Objects;
 
 /**
- * A product of simple groups and U(1)s, its parts in the author's order. Two are equal if their parts and their custom
+ * A product of simple groups and U(1)s, its parts in the author's order. Two are equal if their parts and their entries
  * agree, however they are printed.
  *
  * @param display as printed in messages: {@code SU(3)_C x SU(2)_L x U(1)_Y}
- * @param custom how its irreps are usually named
+ * @param entries how its irreps are usually named
  */
-public record ProductGroup(String display, List<Part> parts, Custom custom) {
+public record ProductGroup(String display, List<Part> parts, Entries entries) {
     public ProductGroup {
         parts = List.copyOf(parts);
     }
@@ -27,7 +27,7 @@ public record ProductGroup(String display, List<Part> parts, Custom custom) {
     public record Charge() implements Part {}
 
     /** How the entries of tuples are usually meant. */
-    public enum Custom {
+    public enum Entries {
         /** {@code (\mathbf{3},\mathbf{2})_{1/6}}. */
         DIMENSIONS,
         /** {@code (1/2,0)}: the irreps of the Lorentz group. */
@@ -57,11 +57,11 @@ public record ProductGroup(String display, List<Part> parts, Custom custom) {
 
     @Override
     public boolean equals(Object other) {
-        return other instanceof ProductGroup that && custom == that.custom && parts.equals(that.parts);
+        return other instanceof ProductGroup that && entries == that.entries && parts.equals(that.parts);
     }
 
     @Override
     public int hashCode() {
-        return Objects.hash(parts, custom);
+        return Objects.hash(parts, entries);
     }
 }

@@ -42,6 +42,29 @@ public final class StatementFinder {
         return statements;
     }
 
+    /**
+     * The only side of a formula that is known to be about representations, so that no evidence is asked for: a single
+     * name will do. Empty if the formula is anything else than one readable side.
+     */
+    public static Optional<Statement> side(String source, Passage passage, Budget budget) {
+        List<List<Lexeme>> sides = new ArrayList<>();
+        for (List<Token> tokens : PassageTokens.streams(passage)) {
+            for (Segment segment : Segmenter.cut(Lowering.lower(tokens, budget))) {
+                sides.addAll(IndexLetters.settle(segment).sides());
+            }
+        }
+        if (sides.size() != 1 || sides.get(0).isEmpty()) {
+            return Optional.empty();
+        }
+        List<Lexeme> only = sides.get(0);
+        Expression tree = new SideReader().read(only, true, budget).tree();
+        if (tree == null) {
+            return Optional.empty();
+        }
+        Span span = only.get(0).span().cover(only.get(only.size() - 1).span());
+        return Optional.of(new Statement(List.of(tree), List.of(), span, span.of(source), false, List.of()));
+    }
+
     /** The tokens to look through; rows of a table that are statements as a whole are read here. */
     private static List<List<Token>> streams(
             String source, Passage passage, SideReader reader, List<Statement> statements, Budget budget) {

@@ -55,6 +55,28 @@ class CommandLineProgramTest {
     }
 
     @Test
+    void derivesInTheNotationAskedFor() {
+        String latex = "(\\mathbf{3},\\mathbf{2})_{1/6}\\otimes(\\bar{\\mathbf 3},\\mathbf 1)_{1/3}";
+        String group = "SU(3) x SU(2) x U(1)";
+        assertEquals(
+                new Run(0, latex + " = (\\mathbf{8},\\mathbf{2})_{1/2}\\oplus(\\mathbf{1},\\mathbf{2})_{1/2}\n", ""),
+                run("", "derive", latex, "--group", group));
+        assertEquals(
+                new Run(0, latex + " = ((1,1),(1))_{1/2}\\oplus((0,0),(1))_{1/2}\n", ""),
+                run("", "derive", latex, "--group", group, "--notation", "dynkin"));
+        assertFailure("--notation is dimension, dynkin or young, not roman", "derive", "3", "--notation", "roman");
+        assertFailure(
+                "irreps of SO(10) are not named by Young diagrams here",
+                "derive",
+                "10\\otimes10",
+                "--group",
+                "SO(10)",
+                "--notation",
+                "young");
+        assertFailure("no embedding of E6 in SU(3) is known here", "derive", "\\mathbf{8}", "--group", "SU(3) -> E6");
+    }
+
+    @Test
     void saysWhatCannotBeDone() {
         assertFailure("--format is text or json, not xml", "check", "--format", "xml", "-");
         assertFailure("there is no rule nonsense; `irreproof rules` lists them", "rules", "nonsense");

@@ -71,6 +71,8 @@ class LauncherIT {
                 new Run(0, "3\\otimes\\bar 3 = 8\\oplus1\n", ""),
                 run(Map.of(), LAUNCHER, "derive", "3\\otimes\\bar 3", "--group", "SU(3)"));
         assertEquals(2, run(Map.of(), LAUNCHER, "derive", "3\\otimes 3").code());
+        assertEquals(
+                new Run(0, "27 \\to 26\\oplus1\n", ""), run(Map.of(), LAUNCHER, "derive", "27", "--group", "E6 -> F4"));
         Run page = run(Map.of(), LAUNCHER, "rules", "dimension-mismatch");
         assertTrue(page.out().startsWith("# dimension-mismatch\n"), page.out());
     }

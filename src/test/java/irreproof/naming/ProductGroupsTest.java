@@ -4,7 +4,7 @@ import static org.junit.jupiter.api.Assertions.assertEquals;
 import static org.junit.jupiter.api.Assertions.assertInstanceOf;
 
 import irreproof.latex.Reader;
-import irreproof.naming.ProductGroup.Custom;
+import irreproof.naming.ProductGroup.Entries;
 import irreproof.notation.GroupName;
 import irreproof.notation.GroupReader;
 import java.util.List;
@@ -45,7 +45,7 @@ class ProductGroupsTest {
                 assertInstanceOf(Resolution.Product.class, resolve(written)).group();
         assertEquals(algebra, group.algebra().toString());
         assertEquals(display, group.display());
-        assertEquals(Custom.DIMENSIONS, group.custom());
+        assertEquals(Entries.DIMENSIONS, group.entries());
     }
 
     @ParameterizedTest
@@ -56,7 +56,7 @@ class ProductGroupsTest {
         ProductGroup group =
                 assertInstanceOf(Resolution.Product.class, resolve(written)).group();
         assertEquals("A1+A1", group.algebra().toString());
-        assertEquals(Custom.SPINS, group.custom());
+        assertEquals(Entries.SPINS, group.entries());
         assertEquals(written, group.display());
     }
 
