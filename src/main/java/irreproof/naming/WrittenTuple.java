@@ -12,6 +12,7 @@ import irreproof.notation.Expression.Name;
 import irreproof.notation.Expression.NumberName;
 import java.math.BigInteger;
 import java.util.ArrayList;
+import java.util.Comparator;
 import java.util.List;
 import java.util.Optional;
 import java.util.regex.Matcher;
@@ -68,7 +69,7 @@ public record WrittenTuple(List<Name> entries, List<Rational> charges, boolean b
 
     private static List<Part> chargesLast(List<Part> parts) {
         List<Part> sorted = new ArrayList<>(parts);
-        sorted.sort(java.util.Comparator.comparing(part -> part instanceof Charge));
+        sorted.sort(Comparator.comparing(part -> part instanceof Charge));
         return sorted;
     }
 
@@ -86,7 +87,7 @@ public record WrittenTuple(List<Name> entries, List<Rational> charges, boolean b
                 }
                 NumberName number = (NumberName) entry;
                 charges.add(new Rational(number.numerator(), BigInteger.valueOf(number.denominator())));
-            } else if (entry instanceof Name name && canName(name)) {
+            } else if (entry instanceof Name name && canName(name) && !isFractionFor(parts.get(i), name)) {
                 names.add(name);
             } else {
                 return Optional.empty();
@@ -105,6 +106,14 @@ public record WrittenTuple(List<Name> entries, List<Rational> charges, boolean b
             names.add(name);
         }
         return Optional.of(names);
+    }
+
+    /** Only irreps of SU(2) go by fractions. */
+    private static boolean isFractionFor(Part part, Name name) {
+        return name instanceof NumberName number
+                && number.denominator() != 1
+                && part instanceof ProductGroup.Simple simple
+                && simple.group().algebra().rank() > 1;
     }
 
     private static boolean canName(Name name) {

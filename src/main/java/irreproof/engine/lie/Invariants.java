@@ -69,6 +69,20 @@ public final class Invariants {
                 .toIntegerExact();
     }
 
+    /** The index in a normalisation of one's choice. */
+    public static Rational dynkinIndex(SimpleAlgebra algebra, DominantWeight weight, IndexNormalisation normalisation) {
+        return Rational.of(dynkinIndex(algebra, weight)).times(normalisation.fundamental());
+    }
+
+    /**
+     * The quadratic Casimir that goes with the index of this normalisation: its value times the dimension of the irrep is
+     * the index times the dimension of the algebra.
+     */
+    public static Rational quadraticCasimir(
+            SimpleAlgebra algebra, DominantWeight weight, IndexNormalisation normalisation) {
+        return quadraticCasimir(algebra, weight).times(Rational.of(2)).times(normalisation.fundamental());
+    }
+
     /**
      * By the sign of the invariant bilinear form of a self-dual irrep, (-1)^(w, 2 rho^vee): Bourbaki, Lie VIII, 7.5,
      * proposition 12.

@@ -122,4 +122,31 @@ class InvariantsTest {
         assertEquals(BigInteger.valueOf(1004), Invariants.cubicAnomaly(algebra, weight));
         assertTrue(CongruenceClass.of(algebra, weight).value() == 2);
     }
+
+    /** Both normalisations are common practice; the columns l and T of invariants.tsv hold each row's source. */
+    @Test
+    void theNormalisationOfTheIndexCanBeChosen() {
+        int checked = 0;
+        for (java.util.Map<String, String> row : Published.rows("invariants.tsv")) {
+            java.util.Optional<SimpleAlgebra> found = Published.algebra(row.get("group"));
+            if (found.isEmpty() || row.get("dynkin_bourbaki").isEmpty()) {
+                continue;
+            }
+            SimpleAlgebra algebra = found.get();
+            DominantWeight irrep = Published.weight(algebra, row.get("dynkin_bourbaki"));
+            Rational half = Invariants.dynkinIndex(algebra, irrep, IndexNormalisation.FUNDAMENTAL_HALF);
+            Rational one = Invariants.dynkinIndex(algebra, irrep, IndexNormalisation.FUNDAMENTAL_ONE);
+            assertEquals(row.get("T=l/2"), half.toString(), row::toString);
+            assertEquals(half.times(Rational.of(2)), one, row::toString);
+            for (IndexNormalisation normalisation : IndexNormalisation.values()) {
+                Rational casimir = Invariants.quadraticCasimir(algebra, irrep, normalisation);
+                assertEquals(
+                        Invariants.dynkinIndex(algebra, irrep, normalisation).times(Rational.of(algebra.dimension())),
+                        casimir.times(Rational.of(WeylDimension.dimension(algebra, irrep))),
+                        row::toString);
+            }
+            checked++;
+        }
+        assertEquals(134, checked);
+    }
 }
