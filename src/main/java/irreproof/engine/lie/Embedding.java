@@ -80,13 +80,56 @@ public record Embedding(
         return new Embedding(algebra, smaller, simpleRows, name + ", then " + next.name);
     }
 
+    /**
+     * The diagonal subalgebra of two equal factors, in the place of the first; the second is not conjugated:
+     * with (R, S) goes R x S.
+     *
+     * @throws IllegalArgumentException if the factors differ or are one
+     */
+    public Embedding diagonal(int first, int second) {
+        List<SimpleAlgebra> factors = new ArrayList<>(subalgebra.factors());
+        if (first == second || !factors.get(first).equals(factors.get(second))) {
+            throw new IllegalArgumentException("no diagonal of factors " + first + " and " + second + " of " + name);
+        }
+        List<List<Rational>> rows = new ArrayList<>();
+        for (int factor = 0; factor < factors.size(); factor++) {
+            if (factor == first) {
+                for (int i = 0; i < factors.get(first).rank(); i++) {
+                    List<Rational> both = List.of(Rational.ONE, Rational.ONE);
+                    rows.add(combination(
+                            both, List.of(rows(first).get(i), rows(second).get(i))));
+                }
+            } else if (factor != second) {
+                rows.addAll(rows(factor));
+            }
+        }
+        rows.addAll(chargeRows());
+        factors.remove(second);
+        ReductiveAlgebra smaller = new ReductiveAlgebra(factors, subalgebra.charges());
+        return new Embedding(algebra, smaller, rows, name + ", diagonal of factors " + first + " and " + second);
+    }
+
+    /**
+     * The same factors with other charges, each a combination of the present ones.
+     *
+     * @param combinations a row of coefficients for each new charge
+     */
+    public Embedding recharged(List<List<Rational>> combinations) {
+        List<List<Rational>> rows = new ArrayList<>(projection.subList(0, projection.size() - subalgebra.charges()));
+        combinations.forEach(row -> rows.add(combination(row, chargeRows())));
+        ReductiveAlgebra same = new ReductiveAlgebra(subalgebra.factors(), combinations.size());
+        return new Embedding(algebra, same, rows, name);
+    }
+
     /** The sum of the rows, each times its coefficient. */
     private static List<Rational> combination(List<Rational> coefficients, List<List<Rational>> rows) {
         List<Rational> sum = new ArrayList<>();
         for (int j = 0; j < rows.get(0).size(); j++) {
             Rational entry = Rational.ZERO;
             for (int i = 0; i < rows.size(); i++) {
-                entry = entry.plus(coefficients.get(i).times(rows.get(i).get(j)));
+                if (coefficients.get(i).signum() != 0 && rows.get(i).get(j).signum() != 0) {
+                    entry = entry.plus(coefficients.get(i).times(rows.get(i).get(j)));
+                }
             }
             sum.add(entry);
         }

@@ -31,9 +31,15 @@ public final class EmbeddingIndex {
         }
         Rational square = Rational.ZERO;
         for (int i = 0; i < system.rank(); i++) {
+            // the form on two simple coroots is 2 C_ij / (squared length of root i): zero but for neighbours
+            Rational row = Rational.ZERO;
             for (int j = 0; j < system.rank(); j++) {
-                Rational form = RegularEmbeddings.corootForm(system, i, j);
-                square = square.plus(form.times(coroot.get(i)).times(coroot.get(j)));
+                if (system.cartan(i, j) != 0) {
+                    row = row.plus(coroot.get(j).times(Rational.of(2L * system.cartan(i, j))));
+                }
+            }
+            if (row.signum() != 0 && coroot.get(i).signum() != 0) {
+                square = square.plus(row.times(coroot.get(i)).dividedBy(RegularEmbeddings.length(system, i)));
             }
         }
         return square.dividedBy(Rational.of(2)).toIntegerExact();

@@ -1,12 +1,8 @@
 package irreproof.engine.lie.embedding;
 
 import irreproof.budget.Budget;
-import irreproof.engine.Decomposition;
 import irreproof.engine.Rational;
-import irreproof.engine.lie.Branching;
-import irreproof.engine.lie.DominantWeight;
 import irreproof.engine.lie.Embedding;
-import irreproof.engine.lie.ReductiveIrrep;
 import irreproof.engine.lie.SimpleAlgebra;
 import java.util.ArrayList;
 import java.util.HashSet;
@@ -17,8 +13,8 @@ import java.util.stream.IntStream;
 /**
  * The inequivalent embeddings that differ from a given one by diagram automorphisms: of the algebra (conjugation, the
  * exchange of an SO(2n)'s spinors, triality), of each simple factor, and by exchanges of equal factors. Charges stay as
- * they are: their sign and scale are the author's choice. Two maps are taken as the same if the irreps that tell linear
- * classes apart (Dynkin 1952) restrict alike. Cost: that many small restrictions for each combination.
+ * they are: their sign and scale are the author's choice. Two maps are taken as the same if
+ * they have one {@link Fingerprint}. Cost: that many small restrictions for each combination.
  */
 public final class EmbeddingVariants {
     private EmbeddingVariants() {}
@@ -26,14 +22,14 @@ public final class EmbeddingVariants {
     /** The given embedding first. */
     public static List<Embedding> of(Embedding embedding, Budget budget) {
         List<Embedding> found = new ArrayList<>();
-        Set<List<Decomposition<ReductiveIrrep>>> seen = new HashSet<>();
+        Set<Fingerprint> seen = new HashSet<>();
         for (int[] nodes : automorphisms(embedding.algebra())) {
             for (List<List<Rational>> rows : rowOrders(embedding)) {
                 List<List<Rational>> projection =
                         rows.stream().map(row -> permuted(row, nodes)).toList();
                 Embedding variant =
                         new Embedding(embedding.algebra(), embedding.subalgebra(), projection, embedding.name());
-                if (seen.add(fingerprint(variant, budget))) {
+                if (seen.add(Fingerprint.of(variant, budget))) {
                     found.add(variant);
                 }
             }
@@ -44,38 +40,17 @@ public final class EmbeddingVariants {
     /** Only those by automorphisms of the algebra. */
     static List<Embedding> imagesOf(Embedding embedding, Budget budget) {
         List<Embedding> found = new ArrayList<>();
-        Set<List<Decomposition<ReductiveIrrep>>> seen = new HashSet<>();
+        Set<Fingerprint> seen = new HashSet<>();
         for (int[] nodes : automorphisms(embedding.algebra())) {
             List<List<Rational>> projection = embedding.projection().stream()
                     .map(row -> permuted(row, nodes))
                     .toList();
             Embedding image = new Embedding(embedding.algebra(), embedding.subalgebra(), projection, embedding.name());
-            if (seen.add(fingerprint(image, budget))) {
+            if (seen.add(Fingerprint.of(image, budget))) {
                 found.add(image);
             }
         }
         return found;
-    }
-
-    /** What the irreps restrict to that determine an embedding up to equivalence. */
-    static List<Decomposition<ReductiveIrrep>> fingerprint(Embedding embedding, Budget budget) {
-        return characteristic(embedding.algebra()).stream()
-                .map(irrep -> Branching.branch(embedding, irrep, budget))
-                .toList();
-    }
-
-    private static List<DominantWeight> characteristic(SimpleAlgebra algebra) {
-        int rank = algebra.rank();
-        int[] first = new int[rank];
-        int[] last = new int[rank];
-        first[0] = 1;
-        last[rank - 1] = 1;
-        return switch (algebra.series()) {
-            case A, B, C, G -> List.of(DominantWeight.of(first));
-            case D -> List.of(DominantWeight.of(first), DominantWeight.of(last));
-            case E -> List.of(DominantWeight.of(rank == 6 ? first : last));
-            case F -> List.of(DominantWeight.of(last));
-        };
     }
 
     /** As permutations of the nodes, the identity first. */

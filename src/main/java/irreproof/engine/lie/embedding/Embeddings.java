@@ -32,6 +32,7 @@ public final class Embeddings {
                         case A, B, C, D -> SpecialEmbeddings.of(algebra, allowed);
                         case E, F, G -> ExceptionalEmbeddings.of(algebra, allowed);
                     });
+            all.forEach(embedding -> allowed.spend((long) embedding.projection().size() * algebra.rank()));
             return List.copyOf(all);
         });
     }

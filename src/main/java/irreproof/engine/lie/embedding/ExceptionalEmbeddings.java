@@ -1,7 +1,6 @@
 package irreproof.engine.lie.embedding;
 
 import irreproof.budget.Budget;
-import irreproof.engine.lie.DominantWeight;
 import irreproof.engine.lie.Embedding;
 import irreproof.engine.lie.Series;
 import irreproof.engine.lie.SimpleAlgebra;
@@ -82,17 +81,10 @@ final class ExceptionalEmbeddings {
                 .filter(entry -> entry.algebra.equals(algebra))
                 .map(entry -> WeightMatching.of(
                         algebra,
-                        smallestIrrep(algebra),
+                        Fingerprint.smallestIrrep(algebra),
                         entry.smallest,
                         "special " + entry.smallest.algebra() + " in " + algebra,
                         budget))
                 .toList();
-    }
-
-    private static DominantWeight smallestIrrep(SimpleAlgebra algebra) {
-        int[] labels = new int[algebra.rank()];
-        boolean firstNode = algebra.series() == Series.G || algebra.equals(E6);
-        labels[firstNode ? 0 : labels.length - 1] = 1;
-        return DominantWeight.of(labels);
     }
 }

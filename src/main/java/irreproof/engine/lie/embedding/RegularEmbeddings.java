@@ -38,14 +38,14 @@ public final class RegularEmbeddings {
      */
     public static Embedding levi(SimpleAlgebra algebra, List<Integer> deleted) {
         RegularEmbeddings regular = new RegularEmbeddings(algebra);
-        List<int[]> coroots = new ArrayList<>();
+        List<RootPair> roots = new ArrayList<>();
         for (int node = 0; node < algebra.rank(); node++) {
             if (!deleted.contains(node)) {
-                coroots.add(regular.simpleCoroot(node));
+                roots.add(regular.simpleRoot(node));
             }
         }
         List<List<Rational>> charges = deleted.stream().map(regular::charge).toList();
-        return regular.embedding(coroots, charges, "Levi, " + described(deleted) + " deleted");
+        return regular.embedding(roots, charges, "Levi, " + described(deleted) + " deleted");
     }
 
     private static String described(List<Integer> nodes) {
@@ -61,14 +61,14 @@ public final class RegularEmbeddings {
      */
     public static Embedding semisimple(SimpleAlgebra algebra, int deleted) {
         RegularEmbeddings regular = new RegularEmbeddings(algebra);
-        List<int[]> coroots = new ArrayList<>();
+        List<RootPair> roots = new ArrayList<>();
         for (int node = 0; node < algebra.rank(); node++) {
             if (node != deleted) {
-                coroots.add(regular.simpleCoroot(node));
+                roots.add(regular.simpleRoot(node));
             }
         }
-        coroots.add(regular.lowestCoroot());
-        return regular.embedding(coroots, List.of(), "regular, extended diagram, node " + (deleted + 1) + " deleted");
+        roots.add(regular.lowestRoot());
+        return regular.embedding(roots, List.of(), "regular, extended diagram, node " + (deleted + 1) + " deleted");
     }
 
     /** The maximal ones, one of each type: Levi of a node of mark 1, then semisimple of a node of prime mark. */
@@ -131,18 +131,25 @@ public final class RegularEmbeddings {
         return Rational.of(2 * form, system.formDenominator());
     }
 
-    private int[] simpleCoroot(int node) {
+    /** A root by its Dynkin labels, and its coroot's coefficients over the simple coroots. */
+    private record RootPair(int[] labels, int[] coroot) {}
+
+    private RootPair simpleRoot(int node) {
+        int[] labels = new int[algebra.rank()];
+        for (int i = 0; i < labels.length; i++) {
+            labels[i] = system.cartan(node, i);
+        }
         int[] coroot = new int[algebra.rank()];
         coroot[node] = 1;
-        return coroot;
+        return new RootPair(labels, coroot);
     }
 
-    private int[] lowestCoroot() {
-        int[] coroot = comarks(system);
-        for (int i = 0; i < coroot.length; i++) {
-            coroot[i] = -coroot[i];
-        }
-        return coroot;
+    private RootPair lowestRoot() {
+        return new RootPair(negated(system.highestRoot().labels()), negated(comarks(system)));
+    }
+
+    private static int[] negated(int[] values) {
+        return IntStream.of(values).map(value -> -value).toArray();
     }
 
     /** A weight's coefficient at a simple root, up to a factor: its form with that fundamental weight. */
@@ -158,12 +165,12 @@ public final class RegularEmbeddings {
         return row;
     }
 
-    private Embedding embedding(List<int[]> coroots, List<List<Rational>> charges, String name) {
-        int size = coroots.size();
+    private Embedding embedding(List<RootPair> roots, List<List<Rational>> charges, String name) {
+        int size = roots.size();
         int[][] cartan = new int[size][size];
         for (int i = 0; i < size; i++) {
             for (int j = 0; j < size; j++) {
-                cartan[i][j] = paired(coroots.get(i), coroots.get(j));
+                cartan[i][j] = paired(roots.get(i).labels, roots.get(j).coroot);
             }
         }
         List<SimpleAlgebra> factors = new ArrayList<>();
@@ -171,30 +178,20 @@ public final class RegularEmbeddings {
         for (DynkinDiagram.Component component : DynkinDiagram.components(cartan)) {
             factors.add(component.algebra());
             for (int index : component.nodes()) {
-                rows.add(IntStream.of(coroots.get(index)).mapToObj(Rational::of).toList());
+                rows.add(IntStream.of(roots.get(index).coroot)
+                        .mapToObj(Rational::of)
+                        .toList());
             }
         }
         rows.addAll(charges);
         return new Embedding(algebra, new ReductiveAlgebra(factors, charges.size()), rows, name);
     }
 
-    /** The root of the first coroot paired with the second coroot. */
-    private int paired(int[] first, int[] second) {
-        Rational length = Rational.ZERO;
-        Rational form = Rational.ZERO;
-        for (int i = 0; i < first.length; i++) {
-            for (int j = 0; j < first.length; j++) {
-                Rational both = corootForm(system, i, j);
-                length = length.plus(both.times(Rational.of((long) first[i] * first[j])));
-                form = form.plus(both.times(Rational.of((long) first[i] * second[j])));
-            }
+    private static int paired(int[] labels, int[] coroot) {
+        int sum = 0;
+        for (int i = 0; i < labels.length; i++) {
+            sum += labels[i] * coroot[i];
         }
-        // <a, b^vee> = 2 (a^vee, b^vee) / (a^vee, a^vee)
-        return form.times(Rational.of(2)).dividedBy(length).toIntegerExact().intValueExact();
-    }
-
-    /** The invariant form on two simple coroots: a long root's coroot has squared length 2. */
-    static Rational corootForm(RootSystem system, int i, int j) {
-        return Rational.of(2L * system.cartan(i, j)).dividedBy(length(system, i));
+        return sum;
     }
 }

@@ -1,7 +1,6 @@
 package irreproof.engine.lie.embedding;
 
 import irreproof.budget.Budget;
-import irreproof.engine.Decomposition;
 import irreproof.engine.Rational;
 import irreproof.engine.lie.Embedding;
 import irreproof.engine.lie.ReductiveAlgebra;
@@ -18,7 +17,7 @@ import java.util.Set;
 /**
  * Subalgebras of a given type, by chains of maximal subalgebras, breadth first; simple factors and u(1)s that the type
  * does not name are dropped (SU(3) of SU(5) by way of SU(3) x SU(2) x U(1)). Chains that end in equal factors of equal
- * index with equal restrictions of small irreps, up to labels, are followed once. Cost grows tenfold with each step for
+ * index with equal restrictions of the smallest irrep, up to labels, are followed once. Cost grows tenfold with each step for
  * large algebras: the caller names the longest chain.
  *
  * <p>Not found: diagonal subalgebras of products, and u(1)s that mix two charges of a chain.
@@ -27,7 +26,7 @@ public final class SubalgebraSearch {
     private final ReductiveAlgebra wanted;
     private final Budget budget;
     private final Set<List<Object>> followed = new HashSet<>();
-    private final Set<List<Decomposition<ReductiveIrrep>>> known = new HashSet<>();
+    private final Set<Fingerprint> known = new HashSet<>();
     private final List<Embedding> found = new ArrayList<>();
 
     private SubalgebraSearch(ReductiveAlgebra wanted, Budget budget) {
@@ -80,12 +79,13 @@ public final class SubalgebraSearch {
         factors.sort(null);
         List<Object> type = new ArrayList<>(factors);
         type.add(embedding.subalgebra().charges());
-        for (Decomposition<ReductiveIrrep> sum : EmbeddingVariants.fingerprint(embedding, budget)) {
-            List<String> parts = new ArrayList<>();
-            sum.multiplicities().forEach((irrep, count) -> parts.add(count + " " + dimensions(embedding, irrep)));
-            parts.sort(null);
-            type.add(parts);
-        }
+        List<String> parts = new ArrayList<>();
+        Fingerprint.of(embedding, budget)
+                .restriction()
+                .multiplicities()
+                .forEach((irrep, count) -> parts.add(count + " " + dimensions(embedding, irrep)));
+        parts.sort(null);
+        type.add(parts);
         return type;
     }
 
@@ -136,9 +136,9 @@ public final class SubalgebraSearch {
         }
         charges.forEach(charge -> rows.add(chain.chargeRows().get(charge)));
         Embedding match = new Embedding(chain.algebra(), wanted, rows, chain.name());
-        if (known.add(EmbeddingVariants.fingerprint(match, budget))) {
+        if (known.add(Fingerprint.of(match, budget))) {
             for (Embedding variant : EmbeddingVariants.of(match, budget)) {
-                known.add(EmbeddingVariants.fingerprint(variant, budget));
+                known.add(Fingerprint.of(variant, budget));
                 found.add(variant);
             }
         }

@@ -69,7 +69,7 @@ class EmbeddingsTest {
             indices.add(EmbeddingIndex.of(embedding, i).toString());
         }
         List<String> terms = new ArrayList<>();
-        EmbeddingVariants.fingerprint(embedding, FREE).get(0).multiplicities().forEach((irrep, count) -> {
+        Fingerprint.of(embedding, FREE).restriction().multiplicities().forEach((irrep, count) -> {
             for (long i = 0; i < count; i++) {
                 terms.add(dimensions(embedding, irrep));
             }

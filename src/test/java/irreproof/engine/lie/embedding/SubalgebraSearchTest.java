@@ -64,8 +64,7 @@ class SubalgebraSearchTest {
         Embedding spinor = ClassicalEmbeddings.spinSeven(FREE);
         assertEquals(so8, spinor.algebra());
         assertTrue(variants.stream()
-                .anyMatch(variant -> EmbeddingVariants.fingerprint(variant, FREE)
-                        .equals(EmbeddingVariants.fingerprint(spinor, FREE))));
+                .anyMatch(variant -> Fingerprint.of(variant, FREE).equals(Fingerprint.of(spinor, FREE))));
     }
 
     /** SU(3)^3 in E6: 27 = (3,3bar,1) + (1,3,3bar) + (3bar,1,3): in each factor the bar may change sides, 2^3 choices. */
@@ -134,5 +133,71 @@ class SubalgebraSearchTest {
         ReductiveAlgebra su2 = ReductiveAlgebra.of(type(Series.A, 1));
         assertThrows(
                 BudgetExceeded.class, () -> SubalgebraSearch.find(type(Series.E, 8), su2, 6, Budget.of(1_000_000)));
+    }
+
+    /** Spinors are told apart without being restricted: SO(64) has two classes of SU(32) x U(1), charges up to sign. */
+    @Test
+    void findsSubalgebrasOfLargeGroups() {
+        ReductiveAlgebra su32 = new ReductiveAlgebra(List.of(type(Series.A, 31)), 1);
+        List<Embedding> found = SubalgebraSearch.find(type(Series.D, 32), su32, 1, FREE);
+        Set<Fingerprint> classes = new HashSet<>();
+        found.forEach(embedding -> classes.add(Fingerprint.of(embedding, FREE)));
+        assertEquals(4, classes.size());
+        assertEquals(4, found.size());
+        assertEquals(
+                2,
+                found.stream()
+                        .map(e -> Fingerprint.of(e, FREE).orientation())
+                        .distinct()
+                        .count());
+    }
+
+    /** The orientation agrees with the spinors themselves: they restrict alike exactly where it is 0. */
+    @Test
+    void orientationTellsSpinorsApart() {
+        for (int rank = 4; rank <= 7; rank++) {
+            SimpleAlgebra algebra = type(Series.D, rank);
+            int[] left = new int[rank];
+            int[] right = new int[rank];
+            left[rank - 2] = 1;
+            right[rank - 1] = 1;
+            for (Embedding embedding : Embeddings.maximal(algebra, FREE)) {
+                assertEquals(
+                        Fingerprint.of(embedding, FREE).orientation() == 0,
+                        Branching.branch(embedding, DominantWeight.of(left), FREE)
+                                .equals(Branching.branch(embedding, DominantWeight.of(right), FREE)),
+                        embedding::toString);
+            }
+        }
+    }
+
+    /** Common practice: the diagonal of SU(2) x SU(2) in SO(4), and hypercharge as T3R + (B-L)/2 in SO(10). */
+    @Test
+    void diagonalsAndMixedCharges() {
+        Embedding product = ClassicalEmbeddings.unitaryProduct(2, 2, FREE);
+        assertEquals(
+                Decomposition.sum(List.of(irrep(2), irrep(0))),
+                Branching.branch(product.diagonal(0, 1), DominantWeight.of(1, 0, 0), FREE));
+        Embedding patiSalam = ClassicalEmbeddings.orthogonalSum(4, 6, FREE);
+        Embedding colour = patiSalam.then(2, ClassicalEmbeddings.unitarySum(3, 1, FREE));
+        Embedding broken = colour.then(1, RegularEmbeddings.levi(type(Series.A, 1), List.of(0)));
+        assertEquals(new ReductiveAlgebra(List.of(type(Series.A, 1), type(Series.A, 2)), 2), broken.subalgebra());
+        // charges of SU(4) > SU(3) x U(1) are 3 (B-L), of SU(2) > U(1) 2 T3
+        Embedding hypercharge = broken.recharged(List.of(List.of(Rational.of(1, 6), Rational.of(1, 2))));
+        Set<Rational> charges = new HashSet<>();
+        Branching.branch(hypercharge, DominantWeight.of(0, 0, 0, 0, 1), FREE)
+                .multiplicities()
+                .keySet()
+                .forEach(term -> charges.add(term.charges().get(0)));
+        Set<Rational> family = Set.of(
+                Rational.of(1, 6),
+                Rational.of(-2, 3),
+                Rational.of(1, 3),
+                Rational.of(-1, 2),
+                Rational.ONE,
+                Rational.ZERO);
+        Set<Rational> conjugate = new HashSet<>();
+        family.forEach(charge -> conjugate.add(charge.negate()));
+        assertTrue(charges.equals(family) || charges.equals(conjugate), charges::toString);
     }
 }
