@@ -13,6 +13,12 @@ import irreproof.check.judge.LieLexicon;
 import irreproof.check.judge.Names;
 import irreproof.engine.lie.DominantWeight;
 import irreproof.naming.Resolution;
+import irreproof.notation.Expression;
+import irreproof.notation.Expression.Face;
+import irreproof.notation.Expression.Name;
+import irreproof.notation.Expression.NumberName;
+import irreproof.notation.Expression.Product;
+import irreproof.notation.Expression.Sum;
 import irreproof.notation.Relation;
 import irreproof.notation.Statement;
 import java.math.BigInteger;
@@ -50,7 +56,8 @@ final class Arbiter {
         }
     }
 
-    Ruling decide(Statement statement, List<SettingCandidate> candidates) {
+    /** @param finiteGroups true if the text around speaks of finite groups or other things that are not judged */
+    Ruling decide(Statement statement, List<SettingCandidate> candidates, boolean finiteGroups) {
         if (!statement.problems().isEmpty()) {
             return Ruling.undecided(
                     "cannot be read: " + statement.problems().get(0).message(), null, SettingSource.NONE);
@@ -64,10 +71,10 @@ final class Arbiter {
         if (Chain.links(statement).isEmpty()) {
             return Ruling.undecided("dots on every side leave nothing to check", null, SettingSource.NONE);
         }
-        return candidates.isEmpty() ? withoutSetting(statement) : among(statement, candidates);
+        return candidates.isEmpty() ? withoutSetting(statement) : among(statement, candidates, finiteGroups);
     }
 
-    private Ruling among(Statement statement, List<SettingCandidate> candidates) {
+    private Ruling among(Statement statement, List<SettingCandidate> candidates, boolean finiteGroups) {
         List<Trial> trials = new ArrayList<>();
         SettingCandidate unsupported = null;
         for (SettingCandidate candidate : candidates) {
@@ -92,7 +99,7 @@ final class Arbiter {
                 .min(Comparator.comparing((Trial trial) -> trial.setting().near())
                         .thenComparingLong(trial -> trial.judgement().distance()));
         if (failed.isPresent()) {
-            return fails(statement, failed.get(), unsupported);
+            return fails(statement, failed.get(), unsupported, finiteGroups);
         }
         return noneFits(statement, trials, unsupported);
     }
@@ -127,9 +134,12 @@ final class Arbiter {
                 null);
     }
 
-    private Ruling fails(Statement statement, Trial failed, SettingCandidate unsupported) {
+    private Ruling fails(Statement statement, Trial failed, SettingCandidate unsupported, boolean finiteGroups) {
         Nearness near = failed.setting().near();
         boolean declared = near == Nearness.DIRECTIVE;
+        if (!declared && finiteGroups) {
+            return settled(failed, Verdict.UNDECIDED, "the text speaks of finite groups or the like");
+        }
         if (!declared && dimensionsDiffer(statement).isPresent()) {
             return settled(failed, Verdict.FAILS, "");
         }
@@ -140,8 +150,10 @@ final class Arbiter {
         if (failed.setting().factor()) {
             return settled(failed, Verdict.UNDECIDED, "it may be about another factor of the group");
         }
+        boolean ofSpin = failed.lexicon().group().algebra().rank() == 1 && near != Nearness.PASSAGE;
         boolean weak = near == Nearness.HEADING
                 || near == Nearness.DOCUMENT
+                || !declared && ofSpin
                 || !declared && !failed.judgement().unknownNames().isEmpty();
         if (weak) {
             Optional<Trial> other = Inference.firstThatHolds(
@@ -244,8 +256,14 @@ final class Arbiter {
         return reason.contains(group) ? reason : group + ": " + reason;
     }
 
-    /** Two sides joined by equality whose dimensions differ, whether numbers are dimensions or spins. */
+    /**
+     * Two sides joined by equality whose dimensions differ, whether numbers are dimensions or spins. Plain digits alone may
+     * be some other arithmetic unless a product of names stands against sums.
+     */
     private static Optional<Ruling.Dimensions> dimensionsDiffer(Statement statement) {
+        if (!speaksOfIrreps(statement)) {
+            return Optional.empty();
+        }
         for (Chain.Link link : Chain.links(statement)) {
             if (!link.isEquation()) {
                 continue;
@@ -257,6 +275,30 @@ final class Arbiter {
             }
         }
         return Optional.empty();
+    }
+
+    private static boolean speaksOfIrreps(Statement statement) {
+        int deciding = Chain.reference(statement);
+        boolean styled = statement.sides().stream()
+                .flatMap(side -> Names.of(side).stream())
+                .anyMatch(name -> !(name instanceof NumberName number)
+                        || number.face() != Face.PLAIN
+                        || number.decoration().bars() > 0);
+        for (int i = 0; i < statement.sides().size(); i++) {
+            Expression side = statement.sides().get(i);
+            if (i != deciding
+                    && side instanceof Name
+                    && Names.multiplies(statement.sides().get(deciding))) {
+                return false;
+            }
+            boolean plain = i == deciding
+                    ? side.parts().stream().allMatch(Name.class::isInstance)
+                    : side instanceof Sum || side instanceof Product;
+            if (!styled && !plain) {
+                return false;
+            }
+        }
+        return true;
     }
 
     private static Optional<Ruling.Dimensions> differ(Statement statement, Chain.Link link, Numbers numbers) {

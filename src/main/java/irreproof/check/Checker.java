@@ -61,7 +61,8 @@ public final class Checker {
             Statement statement = place.statement();
             Ruling ruling = arbiter.decide(
                     statement,
-                    settings.candidates(statement.span(), place.passage().span()));
+                    settings.candidates(statement.span(), place.passage().span()),
+                    settings.speaksOfFiniteGroups(statement.span()));
             cases.add(new Case(statement, ruling, new Wording(document.source(), statement, samples, ruling, budget)));
         }
         return report(cases);

@@ -10,10 +10,12 @@ import irreproof.notation.GroupReader;
 import irreproof.text.Span;
 import java.util.ArrayList;
 import java.util.Comparator;
+import java.util.HashMap;
 import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
 import java.util.Optional;
+import java.util.regex.Pattern;
 
 /**
  * Where a statement's group comes from: a directive settles it; otherwise the groups named in its own passage, its
@@ -23,11 +25,16 @@ import java.util.Optional;
  */
 final class Settings {
     private static final int MOST = 12;
+    private static final Pattern OTHER_MATTERS = Pattern.compile(
+            "(?i:(discrete|finite|permutation|alternating|point)[ ~\\n](sub)?(group|symmetr)|binary[ ~](tetra|octa|icosa)"
+                    + "|in characteristic|fusion[ ~]r|quantum group|identical (particle|fermion|boson)|modulo)"
+                    + "|PSL|\\\\Delta *\\(|\\\\Sigma *\\(|\\bA_\\{?[45]\\b|\\bS_\\{?[345]\\b|\\b[DQ]_\\{?[3-9]\\b|M_\\{?2[2-4]\\b");
 
     private final LatexDocument document;
     private final Directives directives;
     private final Optional<Resolution> defaultGroup;
     private final List<GroupName> mentions;
+    private final Map<Span, Boolean> otherMatters = new HashMap<>();
 
     Settings(LatexDocument document, Directives directives, Optional<Resolution> defaultGroup) {
         this.document = document;
@@ -49,7 +56,7 @@ final class Settings {
             if (!mention.span().overlaps(statement)) {
                 placed.add(new Placed(
                         mention,
-                        nearness(mention.span(), passage, paragraph, above),
+                        nearness(mention.span(), statement, passage, paragraph, above),
                         distance(mention.span(), statement)));
             }
         }
@@ -98,9 +105,12 @@ final class Settings {
                 : 2L * (mention.start() - (long) statement.end()) + 1;
     }
 
-    private static Nearness nearness(Span mention, Span passage, Span paragraph, List<Heading> above) {
-        if (passage.contains(mention)) {
+    private Nearness nearness(Span mention, Span statement, Span passage, Span paragraph, List<Heading> above) {
+        if (passage.contains(mention) && !inLaterRow(statement, mention)) {
             return Nearness.PASSAGE;
+        }
+        if (passage.contains(mention)) {
+            return Nearness.DOCUMENT;
         }
         if (paragraph.contains(mention)) {
             return Nearness.PARAGRAPH;
@@ -108,6 +118,26 @@ final class Settings {
         return above.stream().anyMatch(heading -> heading.span().contains(mention))
                 ? Nearness.HEADING
                 : Nearness.DOCUMENT;
+    }
+
+    /** What is announced in a later row of a display is about that row. */
+    private boolean inLaterRow(Span statement, Span mention) {
+        return mention.start() >= statement.end()
+                && new Span(statement.end(), mention.start())
+                        .of(document.source().content())
+                        .contains("\\\\");
+    }
+
+    /**
+     * Whether the paragraph speaks of finite groups, fusion, identical particles and the like, by which a statement that is
+     * false in the Lie group named beside them may be true.
+     */
+    boolean speaksOfFiniteGroups(Span statement) {
+        return otherMatters.computeIfAbsent(
+                paragraph(statement),
+                place -> OTHER_MATTERS
+                        .matcher(place.of(document.source().content()))
+                        .find());
     }
 
     private Span paragraph(Span statement) {

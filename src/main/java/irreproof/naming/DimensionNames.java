@@ -76,6 +76,11 @@ public final class DimensionNames {
                 .toList();
     }
 
+    /** How many names of this dimension there are, bars and subscripts left aside; more than that have no primes. */
+    public int countOf(BigInteger dimension, Budget budget) {
+        return namesakes(dimension, budget).byPrimes().size();
+    }
+
     /**
      * All irreps that a written name can denote, the most usual first: the dimension binds, the decoration only orders.
      * Bars beyond the first cancel in pairs, and mean nothing on a self-conjugate irrep. The candidates of a barred name

@@ -18,8 +18,8 @@ final class Characters {
     /** The relation a character stands for, or null. */
     static Relation.Kind relation(char c) {
         return switch (c) {
-            case '=', '≅', '≃', '≡', '∼' -> Relation.Kind.EQUAL;
-            case '→', '⟶', '↦' -> Relation.Kind.ARROW;
+            case '=', '≅', '≃', '≡' -> Relation.Kind.EQUAL;
+            case '→', '⟶', '↦', '∼' -> Relation.Kind.ARROW;
             case '⊃', '⊇', '∋' -> Relation.Kind.CONTAINS;
             case '⊂', '⊆', '∈' -> Relation.Kind.CONTAINED;
             default -> null;

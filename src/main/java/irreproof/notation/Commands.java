@@ -127,7 +127,8 @@ final class Commands {
     }
 
     private static void relations() {
-        put(new Related(Kind.EQUAL, false), "cong simeq equiv sim coloneqq doteq isomorphic");
+        put(new Related(Kind.EQUAL, false), "cong simeq equiv coloneqq doteq isomorphic");
+        put(new Related(Kind.ARROW, false), "sim");
         put(new Related(Kind.EQUAL, true), "neq ne ncong nsim nequiv nsimeq");
         put(
                 new Related(Kind.ARROW, false),

@@ -6,9 +6,9 @@ import irreproof.text.Span;
 public record Relation(Kind kind, boolean negated, Span span) {
     /** The meanings a relation sign can have. */
     public enum Kind {
-        /** {@code =}, {@code \cong}, {@code \simeq}, {@code \equiv}, {@code \sim}. */
+        /** {@code =}, {@code \cong}, {@code \simeq}, {@code \equiv}. */
         EQUAL,
-        /** {@code \to}, {@code \rightarrow}, {@code \longrightarrow}, {@code \mapsto}, {@code \xrightarrow}. */
+        /** What need not be an equation: {@code \sim}, a sign of equality marked "sym", {@code \to}, {@code \rightarrow}, {@code \longrightarrow}, {@code \mapsto}, {@code \xrightarrow}. */
         ARROW,
         /** Nothing is written: the two sides stand in cells of one row of a table. */
         CELL,

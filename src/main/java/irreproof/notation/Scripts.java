@@ -116,7 +116,7 @@ final class Scripts {
 
     /** The lexemes of a superscript; none if it says nothing. */
     private static List<Lexeme> superscript(TokenTape tape, TokenTape.Argument argument, Span span) {
-        String text = plain(tape, argument.from(), argument.to());
+        String text = plain(tape, argument.from(), argument.to()).replace('\u2217', '*');
         List<Lexeme> lexemes = new ArrayList<>();
         Matcher exponent = EXPONENT.matcher(text);
         if (PRIMES_AND_STARS.matcher(text).matches()) {

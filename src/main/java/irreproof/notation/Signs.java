@@ -72,15 +72,18 @@ final class Signs {
         if (sign == null) {
             return unreadable(i, base.next());
         }
+        Relation.Kind kind = sign.kind();
         TokenTape.Argument remark = tape.argument(i + 1, to);
         for (int left = remarks; left > 0 && remark != null; left--) {
             if (tape.text(remark.from(), remark.to()).contains("?")) {
                 lexemes.add(Lexeme.bare(StatementParser.BREAK, tape.span(i, base.next())));
                 return base.next();
             }
+            boolean part = tape.text(remark.from(), remark.to()).contains("sym");
+            kind = part && kind == Relation.Kind.EQUAL ? Relation.Kind.ARROW : kind;
             remark = tape.argument(remark.next(), to);
         }
-        return relation(sign.kind(), sign.negated(), i, base.next());
+        return relation(kind, sign.negated(), i, base.next());
     }
 
     private Lexeme.Sign sign(TokenTape.Argument base) {

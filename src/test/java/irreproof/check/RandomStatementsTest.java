@@ -20,7 +20,8 @@ import org.junit.jupiter.api.Test;
 
 /**
  * Soundness on random products, printed with the names of the published tables: as they are they hold without a finding;
- * with a summand dropped, doubled or taken from elsewhere they fail. (That the products themselves are right is tested
+ * with a summand dropped, doubled or taken from elsewhere they fail, or are
+ * undecided where what is left could be meant (a single term, one symmetry of a square). (That the products themselves are right is tested
  * in the engine, against GAP.)
  */
 class RandomStatementsTest {
@@ -75,7 +76,7 @@ class RandomStatementsTest {
         }
         System.out.println("random statements: seed " + SEED + ", " + ROUNDS + " true, " + corrupted + " corrupted, "
                 + undecided + " of them undecided");
-        assertTrue(undecided * 20 <= corrupted, "undecided: " + undecided);
+        assertTrue(undecided * 8 <= corrupted, "undecided: " + undecided);
     }
 
     private void check(LieGroup group, String start, List<String> terms) {

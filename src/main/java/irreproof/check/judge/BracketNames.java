@@ -58,7 +58,7 @@ final class BracketNames {
 
     /** The only entry of round brackets, which may stand there for nothing. */
     static Optional<NumberName> grouped(ListName list) {
-        boolean single = list.bracket() == Bracket.ROUND && list.entries().size() == 1;
+        boolean single = list.entries().size() == 1;
         return single && list.entries().get(0) instanceof NumberName number ? Optional.of(number) : Optional.empty();
     }
 

@@ -73,7 +73,7 @@ public final class Chain {
 
     private static String loose(Relation relation) {
         return switch (relation.kind()) {
-            case ARROW -> "an arrow behind a product may mean a projection";
+            case ARROW -> "this relation behind a product may mean a projection";
             case CELL -> "the cells of a table's row need not be equal";
             case EQUAL, CONTAINS, CONTAINED -> "";
         };

@@ -128,6 +128,13 @@ public final class Judge<I extends Comparable<? super I>> {
         if (!Names.multiplies(deciding) || unknown.stream().anyMatch(ofDeciding::contains)) {
             return Judgement.notItsGroup("", unknown);
         }
+        boolean claimed = links.stream()
+                .filter(link ->
+                        Names.of(statement.sides().get(link.side())).stream().anyMatch(unknown::contains))
+                .allMatch(link -> link.isEquation() && !(statement.sides().get(link.side()) instanceof Name));
+        if (!claimed || Looseness.decomposesFactors(statement, deciding)) {
+            return Judgement.undecided("the group has no irrep of that name, but this may not be meant as an equation");
+        }
         List<Name> known =
                 names.stream().filter(name -> !unknown.contains(name)).toList();
         Reading<I> reading = readings.of(known).all(1).stream().findFirst().orElse(null);
@@ -159,11 +166,14 @@ public final class Judge<I extends Comparable<? super I>> {
         for (Chain.Link link : links) {
             Comparison<I> comparison = compare(link, values);
             comparisons.add(comparison);
-            loose = comparison.holds() || link.loose().isEmpty() ? loose : link.loose();
+            loose = comparison.holds()
+                    ? loose
+                    : Looseness.reason(statement, link, comparison, evaluator).orElse(loose);
         }
         boolean holds = comparisons.stream().allMatch(Comparison::holds);
         if (!loose.isEmpty()) {
-            return Judgement.undecided(loose);
+            return new Judgement<>(
+                    Outcome.UNDECIDED, loose, reading, comparisons, values, List.of(), List.of(), List.of());
         }
         List<WrongPart> wrongParts = holds ? Parts.wrong(statement, lexicon, reading, evaluator, values) : List.of();
         Outcome outcome = holds && wrongParts.isEmpty() ? Outcome.HOLDS : Outcome.FAILS;

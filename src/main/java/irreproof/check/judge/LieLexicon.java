@@ -15,6 +15,7 @@ import irreproof.naming.Custom;
 import irreproof.naming.DimensionNames;
 import irreproof.naming.LieGroup;
 import irreproof.naming.Spins;
+import irreproof.notation.Expression.Bracket;
 import irreproof.notation.Expression.DiagramName;
 import irreproof.notation.Expression.ListName;
 import irreproof.notation.Expression.Name;
@@ -97,7 +98,7 @@ public final class LieLexicon implements Lexicon<DominantWeight> {
             if (name instanceof ListName list) {
                 any = true;
                 senses.removeIf(sense -> sense == Lists.GROUPED
-                        ? BracketNames.grouped(list).isEmpty()
+                        ? BracketNames.grouped(list).isEmpty() || list.bracket() == Bracket.SQUARE && !isSpinGroup()
                         : BracketNames.value(list, sense, group).isEmpty());
                 if (!list.decoration().charges().isEmpty() || BracketNames.isTuple(list)) {
                     throw new Undecidable("irreps of product groups and charges are not judged yet");
@@ -131,15 +132,28 @@ public final class LieLexicon implements Lexicon<DominantWeight> {
             String dimension = number.numerator() + fraction;
             boolean spin = interpretation.numbers() == Numbers.SPIN;
             int primes = number.decoration().primes();
-            return new NameKey(spin ? "" : dimension, primes, dimension + "'".repeat(primes) + suffix(number));
+            String written = dimension + "'".repeat(primes) + suffix(number);
+            return new NameKey(spin ? "" : dimension, primes, written, spin ? "" : mark(number));
         }
         if (name instanceof ListName list && interpretation.lists() == Lists.GROUPED) {
             return key(BracketNames.grouped(list).orElseThrow(), interpretation);
         }
         if (name instanceof ListName list) {
-            return new NameKey("", 0, BracketNames.text(list));
+            return new NameKey("", 0, BracketNames.text(list), "");
         }
-        return new NameKey("", 0, "diagram " + ((DiagramName) name).rows());
+        return new NameKey("", 0, "diagram " + ((DiagramName) name).rows(), "");
+    }
+
+    /** Any other mark, by which an author may tell irreps of one dimension apart, as in 20_S and 20_M. */
+    private String mark(NumberName name) {
+        String label = suffix(name).isEmpty() ? name.decoration().label() : "";
+        String part = name.decoration().symmetry() == null
+                ? ""
+                : name.decoration().symmetry().name();
+        return label
+                + part
+                + name.decoration().other()
+                + String.join(",", name.decoration().charges());
     }
 
     /** A subscript that is part of the name: those of SO(8) and of chiral spinors; elsewhere a mere label. */
@@ -173,6 +187,15 @@ public final class LieLexicon implements Lexicon<DominantWeight> {
         if (meaning.isPresent()) {
             return List.of(new Candidate<>(Decomposition.of(meaning.get()), 0));
         }
+        if (primes > 0
+                && dimensionNames.countOf(number.numerator(), budget) <= primes
+                && number.numerator().signum() > 0) {
+            int namesakes = dimensionNames.countOf(number.numerator(), budget);
+            if (namesakes > 0) {
+                throw Undecidable.otherGroup(group.display() + " has too few irreps of dimension " + number.numerator()
+                        + " for so many primes");
+            }
+        }
         List<Candidate<DominantWeight>> result = new ArrayList<>();
         for (var candidate : dimensionNames.candidates(number.numerator(), 0, primes, suffix(number), budget)) {
             int unusual = candidate.custom().ordinal();
@@ -199,6 +222,14 @@ public final class LieLexicon implements Lexicon<DominantWeight> {
 
     @Override
     public Optional<String> doubt(Collection<Name> names) {
+        boolean marked = names.stream()
+                .anyMatch(name -> name instanceof NumberName number
+                        && suffix(number).isEmpty()
+                        && (!name.decoration().other().isEmpty()
+                                || name.decoration().label().equals("c")));
+        if (marked) {
+            return Optional.of("a superscript or subscript of a name is not understood");
+        }
         boolean numbered =
                 group.family() == LieGroup.Family.EXCEPTIONAL && names.stream().anyMatch(ListName.class::isInstance);
         return numbered

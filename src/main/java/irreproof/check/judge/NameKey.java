@@ -7,8 +7,9 @@ package irreproof.check.judge;
  *     key itself says what it denotes (a Dynkin label)
  * @param number how many primes
  * @param text the name as it can be shown, without bars: {@code 15'}, {@code 8v}, {@code (2,1)}
+ * @param mark a subscript that is no part of the name but may tell irreps of one dimension apart; or empty
  */
-public record NameKey(String family, int number, String text) {
+public record NameKey(String family, int number, String text, String mark) {
     // equals and hashCode written out: a record's generated ones cost a short run more than the rest of its work
 
     @Override
@@ -16,6 +17,7 @@ public record NameKey(String family, int number, String text) {
         return other instanceof NameKey that
                 && number == that.number
                 && text.equals(that.text)
+                && mark.equals(that.mark)
                 && family.equals(that.family);
     }
 
