@@ -139,9 +139,9 @@ public final class LieLexicon implements Lexicon<DominantWeight> {
             return key(BracketNames.grouped(list).orElseThrow(), interpretation);
         }
         if (name instanceof ListName list) {
-            return new NameKey("", 0, BracketNames.text(list), "");
+            return new NameKey("", 0, BracketNames.text(list));
         }
-        return new NameKey("", 0, "diagram " + ((DiagramName) name).rows(), "");
+        return new NameKey("", 0, "diagram " + ((DiagramName) name).rows());
     }
 
     /** Any other mark, by which an author may tell irreps of one dimension apart, as in 20_S and 20_M. */

@@ -10,6 +10,11 @@ package irreproof.check.judge;
  * @param mark a subscript that is no part of the name but may tell irreps of one dimension apart; or empty
  */
 public record NameKey(String family, int number, String text, String mark) {
+    /** A key of a name without such a mark. */
+    public NameKey(String family, int number, String text) {
+        this(family, number, text, "");
+    }
+
     // equals and hashCode written out: a record's generated ones cost a short run more than the rest of its work
 
     @Override
