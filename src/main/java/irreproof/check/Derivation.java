@@ -128,7 +128,7 @@ public final class Derivation {
             return equation(bare, wording.usualSum(value));
         }
         ProductGroup alone = alone(group);
-        AuthorStyle style = AuthorStyle.learn(typed, List.of(bare));
+        AuthorStyle style = DerivedNames.style(typed, bare, notation);
         return equation(
                 bare, new DerivedNames(alone, notation, Entries.DIMENSIONS, style, budget).sum(embedded(value)));
     }

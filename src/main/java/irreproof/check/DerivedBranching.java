@@ -106,7 +106,7 @@ final class DerivedBranching {
         DerivedNotation chosen = notation == DerivedNotation.AUTHOR
                 ? DerivedNames.of(Names.of(bare.sides().get(0)).get(0))
                 : notation;
-        AuthorStyle style = AuthorStyle.learn(typed, List.of(bare));
+        AuthorStyle style = DerivedNames.style(typed, bare, chosen);
         DerivedNames names = new DerivedNames(group, chosen, group.entries(), style, budget);
         DerivedNames plain =
                 new DerivedNames(group, DerivedNotation.DIMENSION, group.entries(), AuthorStyle.standard(), budget);

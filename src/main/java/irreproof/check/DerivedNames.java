@@ -2,6 +2,7 @@ package irreproof.check;
 
 import irreproof.budget.Budget;
 import irreproof.budget.BudgetExceeded;
+import irreproof.check.judge.Names;
 import irreproof.check.judge.Undecidable;
 import irreproof.engine.Decomposition;
 import irreproof.engine.Rational;
@@ -20,6 +21,7 @@ import irreproof.notation.AuthorStyle;
 import irreproof.notation.Expression.DiagramName;
 import irreproof.notation.Expression.ListName;
 import irreproof.notation.Expression.Name;
+import irreproof.notation.Statement;
 import irreproof.notation.Writer;
 import irreproof.notation.WrittenTerm;
 import irreproof.notation.WrittenTerm.WrittenName;
@@ -53,6 +55,14 @@ final class DerivedNames {
         return entry instanceof ListName
                 ? DerivedNotation.DYNKIN
                 : entry instanceof DiagramName ? DerivedNotation.YOUNG : DerivedNotation.DIMENSION;
+    }
+
+    /** The author's style, where the side's first name shows how such names are written; a list of labels shows no tuple. */
+    static AuthorStyle style(String typed, Statement bare, DerivedNotation notation) {
+        Name sample = Names.of(bare.sides().get(0)).get(0);
+        return of(sample) == notation && !(sample instanceof ListName)
+                ? AuthorStyle.learn(typed, List.of(bare))
+                : AuthorStyle.standard();
     }
 
     /** @throws Undecidable if Young diagrams are asked of a group other than SU(n) */

@@ -70,6 +70,7 @@ final class StyleLearner {
     }
 
     private AuthorStyle.Tuples tuples() {
+        tuples.finish();
         List<Sample> names = tuples.numbers().isEmpty() ? numbers : tuples.numbers();
         return new AuthorStyle.Tuples(
                 tuples.style(), NameLearner.learn(names), SpinLearner.learn(tuples.spins(), tuples.numbers()));

@@ -22,9 +22,18 @@ final class TupleLearner {
     private final List<Sample> numbers = new ArrayList<>();
     private final List<Sample> spins = new ArrayList<>();
     private TupleStyle style;
+    /** A list of plain digits, which may be a tuple or Dynkin labels: it teaches only if nothing else does. */
+    private ListName bare;
 
     TupleLearner(String source) {
         this.source = source;
+    }
+
+    /** To be called when all names were looked at. */
+    void finish() {
+        if (style == null && numbers.isEmpty() && spins.isEmpty() && bare != null) {
+            learn(bare);
+        }
     }
 
     /** The numbers inside tuples. */
@@ -61,9 +70,18 @@ final class TupleLearner {
                         || number.face() != Face.PLAIN
                         || !number.decoration().isEmpty()
                         || number.denominator() != 1);
-        if (entries.size() < 2 || !charged && !named) {
+        if (entries.size() < 2) {
             return;
         }
+        if (!charged && !named) {
+            bare = bare == null ? list : bare;
+            return;
+        }
+        learn(list);
+    }
+
+    private void learn(ListName list) {
+        List<Expression> entries = list.entries();
         for (Expression entry : entries) {
             if (entry instanceof NumberName number && number.numerator().signum() >= 0) {
                 String text = number.span().of(source);

@@ -35,6 +35,7 @@ class DerivationTest {
                 "SU(2) x SU(2) x U(1) | (2,2)_{+1}\\otimes(2,1)_{-1/2}" + " | (3,2)_{+1/2}\\oplus(1,2)_{+1/2}",
                 "SO(4) | (\\mathbf{2},\\mathbf{2})^{\\otimes 2} | (\\mathbf{3},\\mathbf{3})\\oplus(\\mathbf{3},\\mathbf{1})"
                         + "\\oplus(\\mathbf{1},\\mathbf{3})\\oplus(\\mathbf{1},\\mathbf{1})",
+                "SO(4) | (2,2)\\otimes(2,1) | (3,2)\\oplus(1,2)",
                 "SL(2,C) | (1/2,0)\\otimes(1/2,0) | (1,0)\\oplus(0,0)",
                 "SO(1,3) | (\\tfrac12,\\tfrac12)\\otimes(\\tfrac12,\\tfrac12) | (1,1)\\oplus(1,0)\\oplus(0,1)\\oplus(0,0)",
                 "Sp(2) x Sp(1) | (\\mathbf{4},\\mathbf{2})\\otimes(\\mathbf{1},\\mathbf{2})"
