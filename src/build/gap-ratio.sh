@@ -1,7 +1,8 @@
 #!/usr/bin/env bash
 # Times one table of 300 typical products of irreps, over all types of simple Lie algebras, with GAP's
-# DecomposeTensorProduct and with the engine, both warmed up, three times each in turns. Prints both (medians) and the
-# ratio; exits with 1 below the bar (20 times).
+# DecomposeTensorProduct and with the engine, both warmed up, three times each in turns. Processor times, so that a busy
+# machine favours neither; nothing is remembered between products. Prints both (medians) and the ratio; exits with 1 below
+# the bar (20 times).
 # Usage: src/build/gap-ratio.sh
 set -euo pipefail
 

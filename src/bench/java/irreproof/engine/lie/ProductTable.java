@@ -1,7 +1,9 @@
 package irreproof.engine.lie;
 
+import com.sun.management.OperatingSystemMXBean;
 import irreproof.budget.Budget;
 import irreproof.engine.Decomposition;
+import java.lang.management.ManagementFactory;
 import java.math.BigInteger;
 import java.util.ArrayList;
 import java.util.Arrays;
@@ -131,27 +133,28 @@ public final class ProductTable {
         program.append("];;\n");
         program.append("run := function() local t, terms; terms := 0; for t in table do\n"
                 + "  terms := terms + Length(DecomposeTensorProduct(t[1], t[2], t[3])[1]); od; return terms; end;;\n"
-                + "run();; start := NanosecondsSinceEpoch();; terms := run();;\n"
-                + "Print(terms, \" \", QuoInt(NanosecondsSinceEpoch() - start, 1000), \"\\n\");\nQUIT;\n");
+                + "run();; start := Runtime();; terms := run();;\n"
+                + "Print(terms, \" \", 1000 * (Runtime() - start), \"\\n\");\nQUIT;\n");
         return program.toString();
     }
 
-    /** Prints the number of terms, and the microseconds of the median round. */
+    /** Prints the number of terms, and the processor time of a round in microseconds: that of all threads, so that
+     * collecting garbage counts.
+     */
     private static void time(List<Product> table) {
         algebras().forEach(RootSystem::of);
-        long[] micros = new long[ROUNDS];
+        OperatingSystemMXBean clock = ManagementFactory.getPlatformMXBean(OperatingSystemMXBean.class);
+        long start = 0;
         long terms = 0;
         for (int round = -WARM_UP; round < ROUNDS; round++) {
+            if (round == 0) {
+                start = clock.getProcessCpuTime();
+            }
             terms = 0;
-            long start = System.nanoTime();
             for (Product product : table) {
                 terms += product.compute().multiplicities().size();
             }
-            if (round >= 0) {
-                micros[round] = (System.nanoTime() - start) / 1000;
-            }
         }
-        Arrays.sort(micros);
-        System.out.println(terms + " " + micros[ROUNDS / 2]);
+        System.out.println(terms + " " + (clock.getProcessCpuTime() - start) / 1000 / ROUNDS);
     }
 }
