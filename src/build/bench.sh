@@ -19,7 +19,7 @@ mkdir -p "$results"
     echo "# Benchmarks of the engine"
     echo
     echo "By \`src/build/bench.sh\`: times of single calls after warm-up, nothing remembered in between. Where the load is above"
-    echo "the cores, the median is that of an idle machine all the same, but not the 99th percentile."
+    echo "the cores, the median is close to that of an idle machine all the same, but not the 99th percentile."
     echo
     echo "The machine: $(lscpu | sed -n 's/^Model name: *//p'), $(nproc) cores, $(java -version 2>&1 | sed -n 2p)."
     echo "Load average at the end: $(cut -d' ' -f1 /proc/loadavg)."
