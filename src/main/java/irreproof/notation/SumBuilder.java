@@ -99,10 +99,13 @@ final class SumBuilder {
         return new Multiple(Trees.count(first), body, span(context));
     }
 
-    /** {@code 16(1)}; more than one entry behind a plain number is a list that is counted, {@code 2(1,1)}. */
+    /**
+     * {@code 16(1)}, {@code 10(-2)}; more than one entry behind a plain number is a list that is counted, {@code 2(1,1)},
+     * and so are several digits without a sign, {@code 2(101)}.
+     */
     private static boolean isCharge(Expression second) {
         List<String> charges = OperandBuilder.charges(second);
-        return charges != null && charges.size() == 1;
+        return charges != null && charges.size() == 1 && !charges.get(0).matches("[0-9]{2,}");
     }
 
     /** The operand at the index, with the charges in brackets that may be all that follows it. */

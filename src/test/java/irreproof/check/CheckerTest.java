@@ -24,6 +24,7 @@ class CheckerTest {
                 "E_8 | S^2(248)=1\\oplus3875\\oplus27000",
                 "SU(3) | (3)\\otimes(\\bar 3)=(8)\\oplus(1)",
                 "SO(7) | (\\mathbf 7)\\otimes(\\mathbf 7)=(\\mathbf 1)\\oplus(\\mathbf{21})\\oplus(\\mathbf{27})",
+                "SU(4) | (101)\\otimes(101)=(000)\\oplus2\\,(101)\\oplus(020)\\oplus(210)\\oplus(012)\\oplus(202)",
                 "SU(3) | (10)\\otimes(01)=(11)\\oplus(00)",
                 "SU(3) | \\yng(1)\\otimes\\yng(1,1)=\\yng(2,1)\\oplus\\yng(1,1,1)",
                 "SU(3) | \\mathbf{3}^{\\otimes3}=\\mathbf{10}\\oplus\\mathbf{8}\\oplus\\mathbf{8}\\oplus\\mathbf{1}",
