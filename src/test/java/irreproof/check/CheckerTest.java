@@ -24,6 +24,8 @@ class CheckerTest {
                 "E_8 | S^2(248)=1\\oplus3875\\oplus27000",
                 "SU(3) | (3)\\otimes(\\bar 3)=(8)\\oplus(1)",
                 "SO(7) | (\\mathbf 7)\\otimes(\\mathbf 7)=(\\mathbf 1)\\oplus(\\mathbf{21})\\oplus(\\mathbf{27})",
+                "SO(10) | (01000)\\otimes(01000)=(00000)\\oplus(01000)\\oplus(20000)\\oplus(00011)\\oplus(02000)\\oplus(10100)",
+                "SU(5) | [1000]\\otimes[1000]=[0100]\\oplus[2000]",
                 "SU(4) | (101)\\otimes(101)=(000)\\oplus2\\,(101)\\oplus(020)\\oplus(210)\\oplus(012)\\oplus(202)",
                 "SU(3) | (10)\\otimes(01)=(11)\\oplus(00)",
                 "SU(3) | \\yng(1)\\otimes\\yng(1,1)=\\yng(2,1)\\oplus\\yng(1,1,1)",

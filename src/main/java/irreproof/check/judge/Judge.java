@@ -62,40 +62,28 @@ public final class Judge<I extends Comparable<? super I>> {
 
     private Judgement<I> judge() {
         List<Judgement<I>> failures = new ArrayList<>();
-        List<Reading<I>> satisfying = new ArrayList<>();
-        Judgement<I> best = null;
+        List<Judgement<I>> held = new ArrayList<>();
         boolean truncated = false;
         for (Interpretation interpretation : lexicon.interpretations(names)) {
-            Readings<I> readings = Readings.of(lexicon, interpretation, names, budget);
-            if (!readings.unknown().isEmpty()) {
-                failures.add(unknown(readings));
-                continue;
-            }
-            Readings<I> possible = new Pruning<>(statement, lexicon, budget).prune(readings, links);
-            boolean held = false;
-            for (Reading<I> reading : possible.all(Readings.MOST)) {
-                Judgement<I> judgement = evaluate(reading);
-                if (judgement.outcome() == Outcome.HOLDS) {
-                    held = true;
-                    satisfying.add(reading);
-                    best = best == null || reading.unusual() < best.reading().unusual() ? judgement : best;
+            try {
+                truncated |= judge(interpretation, held, failures);
+            } catch (BudgetExceeded exceeded) {
+                if (held.isEmpty() || exceeded.reason() == BudgetExceeded.Cause.CANCELLED) {
+                    throw exceeded;
                 }
             }
-            truncated |= possible.truncated();
-            if (!held) {
-                readings.all(REPORTED).forEach(reading -> failures.add(evaluate(reading)));
+            boolean usual =
+                    held.stream().anyMatch(judgement -> judgement.reading().unusual() == 0);
+            if (usual) {
+                break;
             }
         }
-        if (best != null) {
-            return new Judgement<>(
-                    Outcome.HOLDS,
-                    "",
-                    best.reading(),
-                    best.comparisons(),
-                    best.values(),
-                    satisfying,
-                    List.of(),
-                    List.of());
+        if (!held.isEmpty()) {
+            Judgement<I> best = held.stream()
+                    .min(Comparator.comparingInt(
+                            judgement -> judgement.reading().unusual()))
+                    .orElseThrow();
+            return best.satisfiedBy(held.stream().map(Judgement::reading).toList());
         }
         Judgement<I> nearest = failures.stream()
                 .min(Comparator.comparingLong(Judgement::distance))
@@ -108,6 +96,27 @@ public final class Judge<I extends Comparable<? super I>> {
             }
         }
         return nearest;
+    }
+
+    /** Tries the readings under one interpretation; true if some were left out. */
+    private boolean judge(Interpretation interpretation, List<Judgement<I>> held, List<Judgement<I>> failures) {
+        Readings<I> readings = Readings.of(lexicon, interpretation, names, budget);
+        if (!readings.unknown().isEmpty()) {
+            failures.add(unknown(readings));
+            return false;
+        }
+        Readings<I> possible = new Pruning<>(statement, lexicon, budget).prune(readings, links);
+        int before = held.size();
+        for (Reading<I> reading : possible.all(Readings.MOST)) {
+            Judgement<I> judgement = evaluate(reading);
+            if (judgement.outcome() == Outcome.HOLDS) {
+                held.add(judgement);
+            }
+        }
+        if (held.size() == before) {
+            readings.all(REPORTED).forEach(reading -> failures.add(evaluate(reading)));
+        }
+        return possible.truncated();
     }
 
     /** Dimensions are the same in every reading, so that one reading decides. */

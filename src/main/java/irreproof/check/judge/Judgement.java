@@ -77,6 +77,11 @@ public record Judgement<I extends Comparable<? super I>>(
                 .sum();
     }
 
+    /** The same, with all the readings that make it hold. */
+    Judgement<I> satisfiedBy(List<Reading<I>> readings) {
+        return new Judgement<>(outcome, reason, reading, comparisons, values, readings, unknownNames, wrongParts);
+    }
+
     static <I extends Comparable<? super I>> Judgement<I> undecided(String reason) {
         return new Judgement<>(Outcome.UNDECIDED, reason, null, List.of(), List.of(), List.of(), List.of(), List.of());
     }
