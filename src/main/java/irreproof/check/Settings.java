@@ -5,6 +5,7 @@ import irreproof.latex.Heading;
 import irreproof.latex.LatexDocument;
 import irreproof.naming.Groups;
 import irreproof.naming.Resolution;
+import irreproof.naming.SymplecticUsage;
 import irreproof.notation.GroupName;
 import irreproof.notation.GroupReader;
 import irreproof.text.Span;
@@ -34,6 +35,7 @@ final class Settings {
     private final Directives directives;
     private final Optional<Resolution> defaultGroup;
     private final List<GroupName> mentions;
+    private final SymplecticUsage usage;
     private final Map<Span, Boolean> otherMatters = new HashMap<>();
 
     Settings(LatexDocument document, Directives directives, Optional<Resolution> defaultGroup) {
@@ -41,6 +43,7 @@ final class Settings {
         this.directives = directives;
         this.defaultGroup = defaultGroup;
         this.mentions = GroupReader.find(document.prose());
+        this.usage = SymplecticUsage.of(mentions);
     }
 
     /** The groups a statement may be about, nearest first, each group once. */
@@ -79,15 +82,21 @@ final class Settings {
         return new SettingCandidate(group, Nearness.DIRECTIVE, directive.span(), false);
     }
 
-    private static void add(Placed mention, Map<String, SettingCandidate> candidates) {
-        Resolution whole = Groups.resolve(mention.name());
+    /** A simple group, by what the document's Sp(n) counts; products of groups are not judged yet. */
+    private Resolution resolve(GroupName name) {
+        Resolution full = Groups.resolveFully(name, usage);
+        return full instanceof Resolution.Simple ? full : Groups.resolve(name);
+    }
+
+    private void add(Placed mention, Map<String, SettingCandidate> candidates) {
+        Resolution whole = resolve(mention.name());
         candidates.putIfAbsent(
                 whole.display(),
                 new SettingCandidate(whole, mention.near(), mention.name().span(), false));
         if (mention.name().factors().size() > 1) {
             for (GroupName.Factor factor : mention.name().factors()) {
-                Resolution part = Groups.resolve(
-                        new GroupName(List.of(factor), mention.name().span()));
+                Resolution part =
+                        resolve(new GroupName(List.of(factor), mention.name().span()));
                 if (part instanceof Resolution.Simple) {
                     candidates.putIfAbsent(
                             part.display(),

@@ -156,6 +156,16 @@ class CheckerTest {
                 """);
     }
 
+    /** Sp(3) can only count the rank, and so then does Sp(2): its 4 and 5 are those of Sp(4) elsewhere. */
+    @Test
+    void readsSymplecticGroupsByTheDocumentsUsage() {
+        FileReport ranks = report(
+                "Besides $Sp(3)$ there is $Sp(2)$, with $\\mathbf{4}\\otimes\\mathbf{5}=\\mathbf{4}\\oplus\\mathbf{16}$.\n",
+                "");
+        assertEquals(Verdict.HOLDS, ranks.statements().get(0).verdict());
+        assertEquals("Sp(2)", ranks.statements().get(0).setting());
+    }
+
     @Test
     void declaredNamesAreTaken() {
         checks("""
