@@ -71,7 +71,12 @@ final class Arbiter {
         if (Chain.links(statement).isEmpty()) {
             return Ruling.undecided("dots on every side leave nothing to check", null, SettingSource.NONE);
         }
-        return candidates.isEmpty() ? withoutSetting(statement) : among(statement, candidates, finiteGroups);
+        if (!candidates.isEmpty()) {
+            return among(statement, candidates, finiteGroups);
+        }
+        return finiteGroups
+                ? Ruling.undecided("the text speaks of finite groups or the like", null, SettingSource.NONE)
+                : withoutSetting(statement);
     }
 
     private Ruling among(Statement statement, List<SettingCandidate> candidates, boolean finiteGroups) {

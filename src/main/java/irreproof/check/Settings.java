@@ -138,15 +138,26 @@ final class Settings {
     }
 
     /**
-     * Whether the paragraph speaks of finite groups, fusion, identical particles and the like, by which a statement that is
+     * Whether the paragraph, the one before it or a heading above speaks of finite groups, fusion, identical particles and the like, by which a statement that is
      * false in the Lie group named beside them may be true.
      */
     boolean speaksOfFiniteGroups(Span statement) {
         return otherMatters.computeIfAbsent(
                 paragraph(statement),
-                place -> OTHER_MATTERS
-                        .matcher(place.of(document.source().content()))
-                        .find());
+                place -> speaksOfOtherMatters(place)
+                        || before(place).filter(this::speaksOfOtherMatters).isPresent()
+                        || headingsAbove(place.end()).stream()
+                                .anyMatch(heading -> speaksOfOtherMatters(heading.span())));
+    }
+
+    private boolean speaksOfOtherMatters(Span place) {
+        return OTHER_MATTERS.matcher(place.of(document.source().content())).find();
+    }
+
+    private Optional<Span> before(Span paragraph) {
+        return document.paragraphs().stream()
+                .filter(other -> other.end() <= paragraph.start())
+                .reduce((first, last) -> last);
     }
 
     private Span paragraph(Span statement) {

@@ -1,6 +1,7 @@
 package irreproof.workspace;
 
 import irreproof.text.SourceText;
+import java.io.BufferedInputStream;
 import java.io.IOException;
 import java.io.InputStream;
 import java.nio.ByteBuffer;
@@ -39,7 +40,8 @@ public final class FileReading {
     public static SourceText read(InputStream stream, String shown) throws UnreadableFile {
         byte[] bytes;
         try {
-            bytes = stream.readNBytes(LARGEST + 1);
+            // Buffered, because reading a pipe by its file descriptor asks for a position that it does not have.
+            bytes = new BufferedInputStream(stream).readNBytes(LARGEST + 1);
         } catch (IOException e) {
             throw new UnreadableFile(shown + " cannot be read");
         }

@@ -167,6 +167,25 @@ class CheckerTest {
     }
 
     @Test
+    void finiteGroupsNearbyAndDotsAloneDecideNothing() {
+        String triplets =
+                "$\\mathbf3\\otimes\\mathbf3=\\bar{\\mathbf3}\\oplus\\bar{\\mathbf3}\\oplus\\bar{\\mathbf3}$.\n";
+        assertEquals(
+                List.of(),
+                report("The finite group $\\Delta(27)\\subset SU(3)$ acts.\n\nHere " + triplets, "")
+                        .allFindings());
+        assertEquals(
+                List.of(),
+                report("\\section{$\\Delta(27)$}\nA subgroup of $SU(3)$: " + triplets, "")
+                        .allFindings());
+        FileReport psl = report("The group $PSL(2,7)$ has $3\\otimes8=3\\oplus\\bar6\\oplus15$.\n", "");
+        assertEquals(Verdict.UNDECIDED, psl.statements().get(0).verdict());
+        assertEquals(
+                Verdict.UNDECIDED,
+                only("SU(3)", "\\mathbf6\\otimes\\mathbf6=\\ldots").verdict());
+    }
+
+    @Test
     void declaredNamesAreTaken() {
         checks("""
                 % irreproof: name 126 = (0,0,0,2,0)

@@ -65,6 +65,17 @@ class LauncherIT {
         assertEquals(1, run.code());
     }
 
+    /** A pipe, unlike a file put in place of standard input, has no position to ask for. */
+    @Test
+    void readsStandardInputFromAPipe() throws Exception {
+        Process process = start(Map.of(), LAUNCHER, "check", "-").start();
+        process.getOutputStream().write("In $SU(3)$, $3\\otimes3=6\\oplus3$.\n".getBytes(StandardCharsets.UTF_8));
+        process.getOutputStream().close();
+        Run run = finish(process);
+        assertEquals(1, run.code());
+        assertTrue(run.out().startsWith("-:1:"), run.out() + run.err());
+    }
+
     @Test
     void derivesAndExplainsRules() throws Exception {
         assertEquals(

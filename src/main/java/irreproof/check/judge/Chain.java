@@ -100,7 +100,7 @@ public final class Chain {
             return;
         }
         for (int i = first; i <= last; i++) {
-            if (i == reference) {
+            if (i == reference || Names.isOnlyDots(sides.get(i))) {
                 continue;
             }
             String loose = statement.relations().subList(Math.min(i, reference), Math.max(i, reference)).stream()

@@ -34,6 +34,11 @@ public final class Names {
                 || side instanceof Sum sum && sum.terms().stream().anyMatch(Dots.class::isInstance);
     }
 
+    /** True if nothing is written but dots. */
+    public static boolean isOnlyDots(Expression side) {
+        return terms(side).stream().allMatch(Dots.class::isInstance);
+    }
+
     /** True if dots stand anywhere below the top level, where they leave the meaning open. */
     public static boolean hasInnerDots(Expression side) {
         return side.parts().stream().anyMatch(child -> !(child instanceof Dots) && holdsDots(child))
