@@ -74,7 +74,7 @@ final class Arbiter {
         if (!candidates.isEmpty()) {
             return among(statement, candidates, finiteGroups);
         }
-        return finiteGroups
+        return finiteGroups && dimensionsDiffer(statement).isEmpty()
                 ? Ruling.undecided("the text speaks of finite groups or the like", null, SettingSource.NONE)
                 : withoutSetting(statement);
     }

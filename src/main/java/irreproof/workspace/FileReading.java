@@ -11,6 +11,7 @@ import java.nio.charset.StandardCharsets;
 import java.nio.file.Files;
 import java.nio.file.NoSuchFileException;
 import java.nio.file.Path;
+import java.util.Objects;
 
 /**
  * Reads sources from disk or a stream. The encoding: a byte order mark if there is one (it is not part of the text),
@@ -41,7 +42,7 @@ public final class FileReading {
         byte[] bytes;
         try {
             // Buffered, because reading a pipe by its file descriptor asks for a position that it does not have.
-            bytes = new BufferedInputStream(stream).readNBytes(LARGEST + 1);
+            bytes = new BufferedInputStream(Objects.requireNonNull(stream)).readNBytes(LARGEST + 1);
         } catch (IOException e) {
             throw new UnreadableFile(shown + " cannot be read");
         }
