@@ -184,7 +184,8 @@ final class Arbiter {
                     reason(unsupported), unsupported, unsupported.near().source());
         }
         Trial nearest = trials.get(0);
-        if (nearest.setting().near() == Nearness.DIRECTIVE) {
+        boolean named = !nearest.judgement().unknownNames().isEmpty();
+        if (named && nearest.setting().near() == Nearness.DIRECTIVE) {
             return settled(nearest, Verdict.FAILS, "");
         }
         Optional<Trial> inferred = Inference.onlyOneThatHolds(

@@ -124,11 +124,10 @@ final class BracketNames {
                 : Optional.empty();
     }
 
+    /** A column longer than n is a sign that columns are not meant. */
     private static Optional<Decomposition<DominantWeight>> columns(List<Integer> columns, LieGroup group) {
         return isDiagram(columns, group)
-                ? Optional.of(YoungDiagrams.irrepOfColumns(group, columns)
-                        .map(Decomposition::of)
-                        .orElse(Decomposition.zero()))
+                ? YoungDiagrams.irrepOfColumns(group, columns).map(Decomposition::of)
                 : Optional.empty();
     }
 

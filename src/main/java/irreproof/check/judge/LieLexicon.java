@@ -59,6 +59,12 @@ public final class LieLexicon implements Lexicon<DominantWeight> {
 
     @Override
     public List<Interpretation> interpretations(Collection<Name> names) {
+        boolean charged = names.stream()
+                .flatMap(name -> name.decoration().charges().stream())
+                .anyMatch(charge -> charge.matches("[+-].*|.*/.*"));
+        if (charged) {
+            throw new Undecidable("irreps of product groups and charges are not judged yet");
+        }
         List<Interpretation> result = new ArrayList<>();
         for (Numbers numbers : numberSenses(names)) {
             for (Lists lists : listSenses(names)) {
