@@ -21,6 +21,7 @@ import java.nio.file.Files;
 import java.nio.file.Path;
 import java.util.ArrayList;
 import java.util.List;
+import java.util.Optional;
 import java.util.concurrent.Callable;
 import picocli.CommandLine.Model.CommandSpec;
 import picocli.CommandLine.Model.OptionSpec;
@@ -88,6 +89,10 @@ final class CheckCommand implements Subcommand {
 
     private static List<Callable<FileReport>> tasks(ParseResult given, Console console) throws Exception {
         String group = given.matchedOptionValue("--group", "");
+        Optional<String> problem = Checker.problemWithGroup(group);
+        if (problem.isPresent()) {
+            throw new UserError("--group: " + problem.get());
+        }
         FileCache included = new FileCache();
         List<Callable<FileReport>> tasks = new ArrayList<>();
         List<String> paths = new ArrayList<>(List.of(given.matchedPositionalValue(0, new String[0])));

@@ -128,6 +128,9 @@ final class Scripts {
         } else if (POWER_OF_UNKNOWN_SIZE.matcher(text).matches()
                 || CALCULATION.matcher(text).matches()) {
             lexemes.add(Lexeme.bare(StatementParser.UNREADABLE, span));
+        } else if (text.equals("c") || text.contains("dagger") || text.contains("oplus") || text.contains("\u2295")) {
+            // A conjugate or several copies: leaving it out would change what is asserted.
+            lexemes.add(Lexeme.bare(StatementParser.UNREADABLE, span));
         } else if (!text.isEmpty()) {
             ScriptMeaning meaning =
                     LABEL.matcher(text).matches() && text.length() == 1 && !Character.isLetter(text.charAt(0))
